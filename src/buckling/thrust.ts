@@ -1,0 +1,47 @@
+import type { Box } from '../tube/box.js';
+import type { Section } from '../tube/section.js';
+import { Span } from '../tube/span.js';
+
+/** n·P/P_E from which the amplification is held at 1/(1 − 0.999) = 1000. */
+const LAST = 0.999;
+
+/** More than rounding can do to n·P/P_E: near 1 it is allowed for before the quotient magnifies it. */
+const ROUNDING = 4e-15;
+
+/**
+ * Bending amplified by thrust: M* = M/(1 − n·P/P_E), P_E = π²EI/Ls² (engineering basis §2; the usual amplification of a
+ * beam-column, Timoshenko & Gere §1.11).
+ */
+export class ThrustedBending {
+  private readonly bending = Number.NaN;
+  private readonly ratio = Number.NaN;
+  private readonly x = new Span();
+
+  /**
+   * @param bending M, N·m
+   * @param thrust factored thrust n·P, N, ≥ 0
+   * @param youngsModulus E, Pa
+   * @param span Ls, m
+   */
+  constructor(bending: number, thrust: number, youngsModulus: number, span: number) {
+    this.bending = bending;
+    this.ratio = (thrust * span * span) / (Math.PI * Math.PI * youngsModulus);
+  }
+
+  /** M*, N·m. */
+  moment(at: Section): number {
+    return this.bending / (1 - Math.min(this.ratio * at.perSecondMoment, LAST));
+  }
+
+  /** M* over a box; its slope in ln(nP/P_E) is x/(1 − x), and 0 where the amplification is held. */
+  momentOver(over: Box, out: Span): Span {
+    if (this.ratio === 0) return out.homogeneous(this.bending, this.bending, 0, 0, 0);
+    const x = this.x.scaled(over.perSecondMoment, this.ratio);
+    const x0 = Math.min(x.lo - ROUNDING, LAST);
+    const x1 = Math.min(x.hi + ROUNDING, LAST);
+    out.growing(x, x1 === LAST ? 0 : x0 / (1 - x0), x0 === LAST ? 0 : x1 / (1 - x1));
+    out.lo = this.bending / (1 - x0);
+    out.hi = this.bending / (1 - x1);
+    return out;
+  }
+}
