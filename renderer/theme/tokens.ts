@@ -26,14 +26,10 @@ export interface Colours {
   readonly pencil: string;
 }
 
-/** Shape that tells a family apart where colours do not. */
-export type Marker = 'circle' | 'square' | 'triangle' | 'diamond' | 'cross' | 'plus';
-
-/** How a family of materials is drawn: a colour for each theme, and a shape. */
+/** The colour of a family of materials in each theme; its shape is the figure's. */
 export interface Family {
   readonly paper: string;
   readonly blueprint: string;
-  readonly marker: Marker;
 }
 
 /** Everything that colours the window: two themes, and the families of materials by the name in their records. */
@@ -75,18 +71,18 @@ const blueprint: Colours = Object.freeze({
   pencil: '#FF9A94',
 });
 
-const family = (onPaper: string, onBlueprint: string, marker: Marker): Family =>
-  Object.freeze({ paper: onPaper, blueprint: onBlueprint, marker });
+const family = (onPaper: string, onBlueprint: string): Family =>
+  Object.freeze({ paper: onPaper, blueprint: onBlueprint });
 
 /** The palette, in one place: the window, its charts and the memo read it from here. */
 export const TOKENS: Tokens = Object.freeze({
   paper,
   blueprint,
   families: Object.freeze({
-    aluminium: family('#1A6EA6', '#8CC6EC', 'circle'),
-    steel: family('#2B3CA6', '#7A8CF5', 'square'),
-    titanium: family('#8C1F64', '#E871A9', 'triangle'),
-    'carbon/epoxy': family('#047A5A', '#54DDB2', 'diamond'),
-    'glass/epoxy': family('#534A18', '#D0D65A', 'cross'),
+    aluminium: family('#1A6EA6', '#8CC6EC'),
+    steel: family('#2B3CA6', '#7A8CF5'),
+    titanium: family('#8C1F64', '#E871A9'),
+    'carbon/epoxy': family('#047A5A', '#54DDB2'),
+    'glass/epoxy': family('#534A18', '#D0D65A'),
   }),
 });

@@ -3,8 +3,8 @@ import type { Design, LimitEntry, LimitId, Report } from './report.js';
 
 /** What every view of a report says of itself. */
 export const CAUTION =
-  'Preliminary sizing: closed forms for the plain tube, without joints, end fittings or fatigue; check by a qualified ' +
-  'engineer; local codes govern.';
+  'Preliminary sizing of the plain tube. Confirm the allowables for the form that is bought. Joints, fatigue and damage ' +
+  'are not covered unless stated. Check by a qualified engineer; local codes and licensed practice govern.';
 
 /** A limit's name in the trade's words, as its file has it. */
 export function limitLabel(id: LimitId): string {
