@@ -47,22 +47,23 @@ interface Picked {
   readonly name: string;
   readonly design: Design | null;
   readonly flags: readonly Flag[];
+  readonly feasible: boolean;
 }
 
 function pickedOf({ pick, candidates, held }: Report): Picked | null {
   if (pick === null) return null;
   if ('held' in pick) return held.find(({ name }) => name === pick.held) ?? null;
   const found = candidates.find(({ material }) => material === pick.material);
-  return found === undefined ? null : { name: found.material, design: found.design, flags: found.flags };
+  return found === undefined ? null : { ...found, name: found.material };
 }
 
 function pickLines(report: Report): readonly string[] {
   const picked = pickedOf(report);
   if (picked === null || picked.design === null) return ['Pick: none, nothing fits.'];
-  const { name, design, flags } = picked;
+  const { name, design, flags, feasible } = picked;
   const first = report.candidates[0];
-  const lightest =
-    first?.feasible === true && first.design === design ? ', the lightest that fits' : ', chosen in the job';
+  const chosen = feasible ? ', chosen in the job' : ', chosen in the job although it does not pass every limit';
+  const lightest = first?.feasible === true && first.design === design ? ', the lightest that fits' : chosen;
   const notes = flags.map(({ text }) => `Note: ${text}`);
   return [`Pick: ${name}, ${sizeText(design)} mm, ${figuresKept(design.mass)} kg${lightest}.`, ...notes];
 }

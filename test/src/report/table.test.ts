@@ -41,6 +41,12 @@ describe('reportTable', () => {
     expect(tableOf(report)).toContain('Pick: none, nothing fits.');
   });
 
+  it('says of a picked design that it does not pass', () => {
+    const held = { name: 'shelf', material: 'alloy-1', feasible: false, design: sampleDesign(), limits: [], flags: [] };
+    const lines = tableOf({ ...sampleReport(briefOf()), held: [held], pick: { held: 'shelf' } });
+    expect(lines.find((line) => line.startsWith('Pick: '))).toMatch(/although it does not pass every limit\.$/);
+  });
+
   it('names the load case where there are several', () => {
     const loads = [
       { name: 'jam torque', torque: '900 N·m' },
