@@ -1,4 +1,4 @@
-import { conflictWords } from '../pick/conflict.js';
+import { conflictWords } from '../../src/report/noFit.js';
 import type { LineUpRow } from './rows.js';
 
 /** A row for the clipboard, its fields set apart by tabs, numbers with the minus that a spreadsheet reads. */

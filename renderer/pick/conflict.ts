@@ -1,5 +1,5 @@
 import type { Ease, NoFit } from '../../src/report/report.js';
-import { joinWords, limitLabel } from '../../src/report/words.js';
+import { floored } from '../../src/report/noFit.js';
 
 /** A job as far as its load cases have names. */
 export interface NamedLoads {
@@ -23,27 +23,11 @@ export function requirementTerm(path: string, { loads }: NamedLoads): string {
   return loads.length > 1 && name !== '' ? `twist at most, ${name}` : 'twist at most';
 }
 
-/** Why nothing fits, without full stop. */
-export function conflictWords({ conflict }: NoFit): string {
-  if (conflict.length === 0) return 'nothing fits';
-  const words = joinWords(conflict.map(limitLabel));
-  return conflict.length === 1
-    ? `nothing fits: ${words} cannot be met`
-    : `nothing fits: ${words} stand against each other`;
-}
-
 /** What is left where no single requirement opens the way, without full stop; null where one does. */
 export function lastResort({ ease, torqueFactor }: NoFit): string | null {
   if (ease.length > 0) return null;
   if (torqueFactor === null) return 'no single change of the brief lets something fit';
-  return `it fits at ${String(floored(torqueFactor))} times the torque`;
-}
-
-/** Three figures, never more than the factor, so that what it promises holds. */
-function floored(factor: number): number {
-  const said = Number(factor.toPrecision(3));
-  if (said <= factor) return said;
-  return Number((said - 10 ** (Math.floor(Math.log10(factor)) - 2)).toPrecision(3));
+  return `it fits at ${floored(torqueFactor)} times the torque`;
 }
 
 /** One change and how it is said. */

@@ -1,6 +1,6 @@
 import type { Box } from '../tube/box.js';
 import type { Section } from '../tube/section.js';
-import { Span } from '../tube/span.js';
+import { times, type Span } from '../tube/span.js';
 
 /** n·P/P_E from which the amplification is held at 1/(1 − 0.999) = 1000. */
 const LAST = 0.999;
@@ -15,7 +15,6 @@ const ROUNDING = 4e-15;
 export class ThrustedBending {
   private readonly bending = Number.NaN;
   private readonly ratio = Number.NaN;
-  private readonly x = new Span();
 
   /**
    * @param bending M, N·m
@@ -36,12 +35,19 @@ export class ThrustedBending {
   /** M* over a box; its slope in ln(nP/P_E) is x/(1 − x), and 0 where the amplification is held. */
   momentOver(over: Box, out: Span): Span {
     if (this.ratio === 0) return out.homogeneous(this.bending, this.bending, 0, 0, 0);
-    const x = this.x.scaled(over.perSecondMoment, this.ratio);
-    const x0 = Math.min(x.lo - ROUNDING, LAST);
-    const x1 = Math.min(x.hi + ROUNDING, LAST);
-    out.growing(x, x1 === LAST ? 0 : x0 / (1 - x0), x0 === LAST ? 0 : x1 / (1 - x1));
-    out.lo = this.bending / (1 - x0);
-    out.hi = this.bending / (1 - x1);
+    const { perSecondMoment } = over;
+    const x0 = Math.min(this.ratio * perSecondMoment.lo - ROUNDING, LAST);
+    const x1 = Math.min(this.ratio * perSecondMoment.hi + ROUNDING, LAST);
+    const m0 = 1 / (1 - x0);
+    const m1 = 1 / (1 - x1);
+    const f0 = x1 === LAST ? 0 : x0 * m0;
+    const f1 = x0 === LAST ? 0 : x1 * m1;
+    out.lo = this.bending * m0;
+    out.hi = this.bending * m1;
+    out.dLo = times(perSecondMoment.dLo, f0, f1);
+    out.dHi = times(perSecondMoment.dHi, f1, f0);
+    out.tLo = times(perSecondMoment.tLo, f0, f1);
+    out.tHi = times(perSecondMoment.tHi, f1, f0);
     return out;
   }
 }

@@ -63,11 +63,16 @@ export class TorsionBuckling {
     const m1 = this.moderate * q1 * Math.sqrt(root1 * r1);
     const l0 = this.long * q0 * root0;
     const l1 = this.long * q1 * root1;
-    if (m0 >= l1) return out.homogeneous(m0, m1, -0.75 * k1, -0.75 * k0, 0.5);
-    if (l0 >= m1) return out.homogeneous(l0, l1, -1.5 * k1, -1.5 * k0, 0);
-    out.homogeneous(Math.max(m0, l0), Math.max(m1, l1), -1.5 * k1, -0.75 * k0, 0);
-    out.tLo = Math.min(0.5 + 0.75 * k0, 1.5 * k0);
-    out.tHi = Math.max(0.5 + 0.75 * k1, 1.5 * k1);
+    const moderate = m0 >= l1;
+    const long = !moderate && l0 >= m1;
+    const t0 = 0.5 + 0.75 * k0;
+    const t1 = 0.5 + 0.75 * k1;
+    out.lo = Math.max(m0, l0);
+    out.hi = Math.max(m1, l1);
+    out.dLo = (moderate ? -0.75 : -1.5) * k1;
+    out.dHi = (long ? -1.5 : -0.75) * k0;
+    out.tLo = moderate ? t0 : long ? 1.5 * k0 : Math.min(t0, 1.5 * k0);
+    out.tHi = moderate ? t1 : long ? 1.5 * k1 : Math.max(t1, 1.5 * k1);
     return out;
   }
 }

@@ -1,9 +1,10 @@
 import type { Box } from '../tube/box.js';
 import type { Section } from '../tube/section.js';
-import { Span } from '../tube/span.js';
+import { share, Span, times } from '../tube/span.js';
+import { DirectBuckling } from './direct.js';
 import { interaction, interactionOver } from './interaction.js';
-import { BENDING_LOSS, COMPRESSION_LOSS, decayOf, knockdown, knockdownOver } from './knockdown.js';
-import { parabola, parabolaOver, slope } from './parabola.js';
+import { BENDING_LOSS, COMPRESSION_LOSS, decay, knockdown } from './knockdown.js';
+import { parabola, slope } from './parabola.js';
 import type { ThrustedBending } from './thrust.js';
 import type { TorsionBuckling } from './torsion.js';
 
@@ -35,30 +36,34 @@ export interface WallMaterial {
  */
 export class WallBuckling {
   private readonly classical = Number.NaN;
-  private readonly plateau = Number.NaN;
   private readonly compressiveYield = Number.NaN;
+  private readonly plateau = Number.NaN;
   private readonly torque = Number.NaN;
   private readonly thrust = Number.NaN;
   private readonly factor = Number.NaN;
   private readonly bending: ThrustedBending | null;
-  private readonly a = new Span();
-  private readonly b = new Span();
-  private readonly c = new Span();
-  private readonly s = new Span();
+  private readonly compression: DirectBuckling;
+  private readonly flexure: DirectBuckling;
+  private readonly elastic = new Span();
+  private readonly moment = new Span();
+  private readonly force = new Span();
+  private readonly direct = new Span();
 
   constructor(
     private readonly torsion: TorsionBuckling,
     material: WallMaterial,
     loads: WallLoads,
   ) {
-    const { youngsModulus, poissonRatio } = material;
+    const { youngsModulus, poissonRatio, compressiveYield } = material;
     this.plateau = material.shearPlateau;
-    this.compressiveYield = material.compressiveYield;
     this.torque = loads.torque;
     this.thrust = loads.thrust;
     this.factor = loads.factor;
     this.bending = loads.bending;
+    this.compressiveYield = compressiveYield;
     this.classical = youngsModulus / Math.sqrt(3 * (1 - poissonRatio * poissonRatio));
+    this.compression = new DirectBuckling(COMPRESSION_LOSS, this.classical, compressiveYield);
+    this.flexure = new DirectBuckling(BENDING_LOSS, this.classical, compressiveYield);
   }
 
   /** Torque at which the wall buckles in pure torsion, N·m. */
@@ -70,66 +75,83 @@ export class WallBuckling {
   /** U at a point. */
   utilisation(at: Section): number {
     const shear = this.torque / this.criticalTorque(at);
-    return this.thrust === 0 && this.bending === null ? shear : interaction(this.direct(at), shear);
+    return this.thrust === 0 && this.bending === null ? shear : interaction(this.directAt(at), shear);
   }
 
   /** U over a box. */
   bound(over: Box, out: Span): void {
-    const { a, b, c, s, torque, thrust, bending } = this;
-    if (torque > 0) {
-      parabolaOver(a, this.torsion.stressOver(over, a), this.plateau);
-      s.inverse(b.product(b.product(over.area, over.meanRadius), a), torque);
-      if (thrust === 0 && bending === null) return void out.copy(s);
-    }
-    if (thrust > 0) this.compressionOver(over, c);
-    if (bending !== null) {
-      this.bendingOver(over, bending, b);
-      if (thrust > 0) c.sum(c, b);
-      else c.copy(b);
-    }
-    if (torque > 0) interactionOver(out, c, s);
-    else out.copy(c);
+    const { direct, torque, thrust, bending } = this;
+    if (torque > 0) this.shearOver(over, out);
+    if (thrust === 0 && bending === null) return;
+    this.directOver(over, direct);
+    if (torque > 0) interactionOver(out, direct, out);
+    else out.copy(direct);
   }
 
   /** R_c + R_b */
-  private direct(at: Section): number {
+  private directAt(at: Section): number {
     const { thrust, bending, compressiveYield } = this;
-    const { area, thickness } = at;
-    const elastic = this.classical * thickness;
-    const decay = decayOf(thickness);
+    const elastic = this.classical * at.thickness;
+    const decayed = decay.at(at).value;
     let ratio = 0;
-    if (thrust > 0) ratio = thrust / (area * parabola(knockdown(decay, COMPRESSION_LOSS) * elastic, compressiveYield));
+    if (thrust > 0)
+      ratio = thrust / (at.area * parabola(knockdown(decayed, COMPRESSION_LOSS) * elastic, compressiveYield));
     if (bending === null) return ratio;
-    const stress = parabola(knockdown(decay, BENDING_LOSS) * elastic, compressiveYield);
-    return ratio + (2 * this.factor * bending.moment(at)) / (area * at.meanRadius * stress);
+    const stress = parabola(knockdown(decayed, BENDING_LOSS) * elastic, compressiveYield);
+    return ratio + (2 * this.factor * bending.moment(at)) / (at.area * at.meanRadius * stress);
   }
 
-  /**
-   * A·σ_cr, N, in compression or in bending, over a box. σ_cr is a function of q = tc/r alone, and A and q have the
-   * slopes k and −k in D: so the force has k(1 − e), e = dln σ_cr/dln q ≥ 0, and is homogeneous of degree 2.
-   */
-  private forceOver({ thickness, area }: Box, loss: number, out: Span): Span {
-    const { classical, compressiveYield: plateau } = this;
-    const { dLo: k0, dHi: k1 } = area;
-    const { a } = this;
-    knockdownOver(a, thickness, loss);
-    const lo = a.lo * classical * thickness.lo;
-    const hi = a.hi * classical * thickness.hi;
-    const e0 = slope(hi, plateau) * (1 + a.tLo / k1);
-    const e1 = slope(lo, plateau) * (1 + a.tHi / k0);
-    const d0 = Math.min(k0 * (1 - e1), k1 * (1 - e1));
-    const d1 = Math.max(k0 * (1 - e0), k1 * (1 - e0));
-    return out.homogeneous(area.lo * parabola(lo, plateau), area.hi * parabola(hi, plateau), d0, d1, 2);
+  private directOver(over: Box, out: Span): void {
+    const { thrust, bending, force } = this;
+    if (bending !== null) this.bendingOver(over, bending, out);
+    if (thrust === 0) return;
+    this.compression.forceOver(over, force);
+    if (bending === null) out.inverse(force, thrust);
+    else this.addThrust(force, out);
   }
 
-  private compressionOver(over: Box, out: Span): void {
-    out.inverse(this.forceOver(over, COMPRESSION_LOSS, out), this.thrust);
+  /** Adds R_c to R_b over a box: slopes mixed by the share of R_c. */
+  private addThrust(force: Span, out: Span): void {
+    const { thrust } = this;
+    const { lo: b0, hi: b1 } = out;
+    const c0 = thrust / force.hi;
+    const c1 = thrust / force.lo;
+    const w0 = c0 / (c0 + b1);
+    const w1 = c1 / (c1 + b0);
+    out.lo = c0 + b0;
+    out.hi = c1 + b1;
+    out.dLo = share(-force.dHi, out.dLo, w0, w1);
+    out.dHi = share(-force.dLo, out.dHi, w1, w0);
+    out.tLo = share(-force.tHi, out.tLo, w0, w1);
+    out.tHi = share(-force.tLo, out.tHi, w1, w0);
   }
 
+  /** R_s over a box. */
+  private shearOver(over: Box, out: Span): void {
+    const { elastic, plateau, torque } = this;
+    const { area, meanRadius: r } = over;
+    this.torsion.stressOver(over, elastic);
+    const f0 = slope(elastic.hi, plateau);
+    const f1 = slope(elastic.lo, plateau);
+    out.lo = torque / (area.hi * r.hi * parabola(elastic.hi, plateau));
+    out.hi = torque / (area.lo * r.lo * parabola(elastic.lo, plateau));
+    out.dLo = -(area.dHi + r.dHi + times(elastic.dHi, f1, f0));
+    out.dHi = -(area.dLo + r.dLo + times(elastic.dLo, f0, f1));
+    out.tLo = -(area.tHi + r.tHi + times(elastic.tHi, f1, f0));
+    out.tHi = -(area.tLo + r.tLo + times(elastic.tLo, f0, f1));
+  }
+
+  /** R_b over a box. */
   private bendingOver(over: Box, bending: ThrustedBending, out: Span): void {
-    const { a } = this;
-    this.forceOver(over, BENDING_LOSS, out);
-    out.inverse(out.product(out, over.meanRadius), 2 * this.factor);
-    out.product(out, bending.momentOver(over, a));
+    const { moment, force } = this;
+    const { meanRadius: r } = over;
+    this.flexure.forceOver(over, force);
+    bending.momentOver(over, moment);
+    out.lo = (2 * this.factor * moment.lo) / (force.hi * r.hi);
+    out.hi = (2 * this.factor * moment.hi) / (force.lo * r.lo);
+    out.dLo = moment.dLo - force.dHi - r.dHi;
+    out.dHi = moment.dHi - force.dLo - r.dLo;
+    out.tLo = moment.tLo - force.tHi - r.tHi;
+    out.tHi = moment.tHi - force.tLo - r.tLo;
   }
 }

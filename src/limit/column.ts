@@ -1,15 +1,15 @@
 import { interaction, interactionOver } from '../buckling/interaction.js';
-import { parabola, parabolaOver } from '../buckling/parabola.js';
+import { parabola, slope } from '../buckling/parabola.js';
 import type { LoadCase } from '../job/job.js';
 import type { Metal } from '../material/material.js';
 import type { Box } from '../tube/box.js';
 import { MEASURE } from '../tube/measure.js';
 import type { Section } from '../tube/section.js';
-import { Span } from '../tube/span.js';
+import { Span, times } from '../tube/span.js';
 import type { Check, Limit, Pair, Proportion } from './check.js';
 
 /** A long shaft under thrust and torque between pinned bearings. */
-class Column implements Check {
+export class Column implements Check {
   readonly limit = 'column';
   readonly proportion: Proportion | null;
   private readonly torque = Number.NaN;
@@ -46,10 +46,24 @@ class Column implements Check {
     const { c } = this;
     if (this.torque > 0) out.scaled(over.perSecondMoment, this.twisting);
     if (this.thrust === 0) return;
-    parabolaOver(c, c.scaled(over.gyrationSquared, this.euler), this.plateau);
-    c.inverse(c.product(c, over.area), this.thrust);
+    this.thrustOver(over, c);
     if (this.torque > 0) interactionOver(out, c, out);
     else out.copy(c);
+  }
+
+  /** n_b·P/P_cr over a box. */
+  private thrustOver({ area, gyrationSquared: g }: Box, out: Span): void {
+    const { thrust, plateau, euler } = this;
+    const e0 = euler * g.lo;
+    const e1 = euler * g.hi;
+    const f0 = slope(e1, plateau);
+    const f1 = slope(e0, plateau);
+    out.lo = thrust / (area.hi * parabola(e1, plateau));
+    out.hi = thrust / (area.lo * parabola(e0, plateau));
+    out.dLo = -(area.dHi + times(g.dHi, f1, f0));
+    out.dHi = -(area.dLo + times(g.dLo, f0, f1));
+    out.tLo = -(area.tHi + times(g.tHi, f1, f0));
+    out.tHi = -(area.tLo + times(g.tLo, f0, f1));
   }
 
   pair(at: Section): Pair {

@@ -5,7 +5,7 @@ import type { LimitId } from '../report/report.js';
 import type { Box } from '../tube/box.js';
 import { MEASURE } from '../tube/measure.js';
 import type { Section } from '../tube/section.js';
-import { Span } from '../tube/span.js';
+import { share, Span } from '../tube/span.js';
 import type { Check, Pair, Proportion } from './check.js';
 
 /** What a strength limit compares with: factor n and the allowables in tension and in shear, Pa. */
@@ -30,9 +30,8 @@ export class StrengthCheck implements Check {
   private readonly axial = Number.NaN;
   /** n/(j·Ft), 1/Pa */
   private readonly perDirect = Number.NaN;
-  private readonly a = new Span();
-  private readonly b = new Span();
-  private readonly c = new Span();
+  private readonly moment = new Span();
+  private readonly direct = new Span();
 
   constructor(
     readonly limit: LimitId,
@@ -58,25 +57,17 @@ export class StrengthCheck implements Check {
   utilisation(at: Section): number {
     const tau = this.shear * at.shearPerTorque;
     if (this.axial === 0 && this.bending === null) return tau;
-    const sigma = this.direct(at);
+    const sigma = this.directAt(at);
     return Math.sqrt(sigma * sigma + tau * tau);
   }
 
   bound(over: Box, out: Span): void {
-    const { a, b, c } = this;
-    if (this.torque > 0) {
-      out.scaled(over.shearPerTorque, this.shear);
-      if (this.axial === 0 && this.bending === null) return;
+    const { direct } = this;
+    if (this.axial === 0 && this.bending === null) out.scaled(over.shearPerTorque, this.shear);
+    else {
+      this.directOver(over, direct);
+      this.circleOver(over.shearPerTorque, direct, out);
     }
-    if (this.axial > 0) a.inverse(over.area, this.axial);
-    if (this.bending !== null) {
-      b.scaled(over.shearPerTorque, 2 * this.perDirect);
-      b.product(b, this.bending.momentOver(over, c));
-      if (this.axial > 0) a.sum(a, b);
-      else a.copy(b);
-    }
-    if (this.torque > 0) out.hypotenuse(out, a);
-    else out.copy(a);
   }
 
   pair(at: Section): Pair {
@@ -85,10 +76,45 @@ export class StrengthCheck implements Check {
   }
 
   /** n·σ/(j·Ft); M*·ro/I is twice M*·ro/J */
-  private direct(at: Section): number {
+  private directAt(at: Section): number {
     const axial = this.axial / at.area;
     if (this.bending === null) return axial;
     return axial + 2 * this.perDirect * this.bending.moment(at) * at.shearPerTorque;
+  }
+
+  /** The same over a box: slopes mixed by the share of N/A. */
+  private directOver(over: Box, out: Span): void {
+    const { axial, bending, moment } = this;
+    const { area, shearPerTorque: q } = over;
+    if (bending === null) return void out.inverse(area, axial);
+    bending.momentOver(over, moment);
+    const a0 = axial / area.hi;
+    const a1 = axial / area.lo;
+    const b0 = 2 * this.perDirect * moment.lo * q.lo;
+    const b1 = 2 * this.perDirect * moment.hi * q.hi;
+    const w0 = a0 / (a0 + b1);
+    const w1 = a1 / (a1 + b0);
+    out.lo = a0 + b0;
+    out.hi = a1 + b1;
+    out.dLo = share(-area.dHi, moment.dLo + q.dLo, w0, w1);
+    out.dHi = share(-area.dLo, moment.dHi + q.dHi, w1, w0);
+    out.tLo = share(-area.tHi, moment.tLo + q.tLo, w0, w1);
+    out.tHi = share(-area.tLo, moment.tHi + q.tHi, w1, w0);
+  }
+
+  /** √(τ² + σ²) over a box, τ a multiple of ro/J: slopes mixed by the share of τ². */
+  private circleOver(q: Span, direct: Span, out: Span): void {
+    const t0 = this.shear * q.lo;
+    const t1 = this.shear * q.hi;
+    const { lo: s0, hi: s1 } = direct;
+    const w0 = (t0 * t0) / (t0 * t0 + s1 * s1);
+    const w1 = (t1 * t1) / (t1 * t1 + s0 * s0);
+    out.lo = Math.sqrt(t0 * t0 + s0 * s0);
+    out.hi = Math.sqrt(t1 * t1 + s1 * s1);
+    out.dLo = share(q.dLo, direct.dLo, w0, w1);
+    out.dHi = share(q.dHi, direct.dHi, w1, w0);
+    out.tLo = share(q.tLo, direct.tLo, w0, w1);
+    out.tHi = share(q.tHi, direct.tHi, w1, w0);
   }
 }
 

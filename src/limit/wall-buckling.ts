@@ -12,10 +12,10 @@ import type { Check, Limit, Pair } from './check.js';
 const PAST_YIELD = 1.2;
 
 /** Buckling of the wall under factored torsion, thrust and bending. */
-class WallBucklingCheck implements Check {
+export class WallBucklingCheck implements Check {
   readonly limit = 'wall-buckling';
   readonly proportion = null;
-  private readonly wall: WallBuckling;
+  readonly wall: WallBuckling;
   private readonly torque = Number.NaN;
   private readonly combined: boolean;
 

@@ -2,7 +2,7 @@ import type { LoadCase, Speed } from '../job/job.js';
 import type { Metal } from '../material/material.js';
 import type { Box } from '../tube/box.js';
 import type { Section } from '../tube/section.js';
-import { Span } from '../tube/span.js';
+import { times, type Span } from '../tube/span.js';
 import type { Check, Limit, Pair } from './check.js';
 
 /** The stiffness that thrust and torque leave, squared, is never taken below this. */
@@ -20,10 +20,14 @@ export class WhirlSpeed {
   private readonly shear = Number.NaN;
   private readonly thrust = Number.NaN;
   private readonly torque = Number.NaN;
-  private readonly c = new Span();
+  private readonly demand = Number.NaN;
 
-  /** @param span Ls, m */
-  constructor(load: LoadCase, metal: Metal, span: number) {
+  /**
+   * @param span Ls, m
+   * @param demand Ω that ω₁ is compared with, rad/s
+   */
+  constructor(load: LoadCase, metal: Metal, span: number, demand = 1) {
+    this.demand = demand;
     const { youngsModulus, shearModulus, poissonRatio, density } = metal;
     const wave = Math.PI / span;
     // thin round tube: G. R. Cowper, J. Appl. Mech. 33 (1966), from memory
@@ -42,40 +46,34 @@ export class WhirlSpeed {
     return this.stiffness * Math.sqrt((g * left) / (1 + this.shear * g));
   }
 
-  /** ω₁ over a box. */
-  speedOver(over: Box, out: Span): void {
-    const g = over.gyrationSquared;
-    const z0 = this.shear * g.lo;
-    const z1 = this.shear * g.hi;
-    const lo = this.stiffness * Math.sqrt(g.lo / (1 + z0));
-    const hi = this.stiffness * Math.sqrt(g.hi / (1 + z1));
-    out.growing(g, 0.5 / (1 + z1), 0.5 / (1 + z0));
-    out.lo = lo;
-    out.hi = hi;
-    if (this.thrust > 0 || this.torque > 0) out.product(out, this.leftOver(over, this.c));
-  }
-
-  /** √(1 − v) over a box: dln√(1 − v)/dln I = (½·P/P_E + (T/T_cr)²)/(1 − v), and 0 where it is held. */
-  private leftOver(over: Box, out: Span): Span {
-    const { secondMoment, perSecondMoment: c } = over;
-    const p0 = this.thrust * c.lo;
-    const p1 = this.thrust * c.hi;
-    const s0 = this.torque * c.lo;
-    const s1 = this.torque * c.hi;
+  /**
+   * Ω/ω₁ over a box. The slopes of ω₁ are those of I/A times 1/(2(1 + z)), and those of I times what thrust and torque
+   * take: (½·P/P_E + (T/T_cr)²)/(1 − v), or 0 where 1 − v is held.
+   */
+  ratioOver({ gyrationSquared: g, perSecondMoment: c }: Box, out: Span): void {
+    const { shear, stiffness, thrust, torque, demand } = this;
+    const z0 = 1 / (1 + shear * g.lo);
+    const z1 = 1 / (1 + shear * g.hi);
+    const p0 = thrust * c.lo;
+    const p1 = thrust * c.hi;
+    const s0 = torque * c.lo;
+    const s1 = torque * c.hi;
     const t0 = s0 * s0;
     const t1 = s1 * s1;
     const most = Math.max(1 - p0 - t0 + ROUNDING, LEAST_LEFT);
     const least = Math.max(1 - p1 - t1 - ROUNDING, LEAST_LEFT);
     const f0 = least > LEAST_LEFT ? (0.5 * p0 + t0) / most : 0;
     const f1 = most > LEAST_LEFT ? (0.5 * p1 + t1) / least : 0;
-    out.growing(secondMoment, f0, f1);
-    out.lo = Math.sqrt(least);
-    out.hi = Math.sqrt(most);
-    return out;
+    out.lo = demand / (stiffness * Math.sqrt(g.hi * z1 * most));
+    out.hi = demand / (stiffness * Math.sqrt(g.lo * z0 * least));
+    out.dLo = -times(g.dHi, 0.5 * z0, 0.5 * z1) - times(-c.dLo, f1, f0);
+    out.dHi = -times(g.dLo, 0.5 * z1, 0.5 * z0) - times(-c.dHi, f0, f1);
+    out.tLo = -times(g.tHi, 0.5 * z0, 0.5 * z1) - times(-c.tLo, f1, f0);
+    out.tHi = -times(g.tLo, 0.5 * z1, 0.5 * z0) - times(-c.tHi, f0, f1);
   }
 }
 
-class Whirl implements Check {
+export class Whirl implements Check {
   readonly limit = 'whirl';
   readonly proportion = null;
   private readonly first: WhirlSpeed;
@@ -88,8 +86,8 @@ class Whirl implements Check {
     span: number,
     { max, margin }: Speed,
   ) {
-    this.first = new WhirlSpeed(loadCase, metal, span);
     this.demand = margin * max;
+    this.first = new WhirlSpeed(loadCase, metal, span, this.demand);
   }
 
   utilisation(at: Section): number {
@@ -97,8 +95,7 @@ class Whirl implements Check {
   }
 
   bound(over: Box, out: Span): void {
-    this.first.speedOver(over, out);
-    out.inverse(out, this.demand);
+    this.first.ratioOver(over, out);
   }
 
   pair(at: Section): Pair {

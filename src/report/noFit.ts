@@ -1,7 +1,8 @@
 import type { NoFit } from './report.js';
 import { figures, joinWords, limitLabel } from './words.js';
 
-function conflictWords({ conflict }: NoFit): string {
+/** Why nothing fits, without full stop. */
+export function conflictWords({ conflict }: NoFit): string {
   const words = joinWords(conflict.map(limitLabel));
   if (conflict.length === 0) return 'nothing fits';
   return conflict.length === 1
@@ -10,7 +11,7 @@ function conflictWords({ conflict }: NoFit): string {
 }
 
 /** The factor rounded down to three figures, so that what it promises holds. */
-function floored(factor: number): string {
+export function floored(factor: number): string {
   const [head = '0', exponent = '0'] = factor.toExponential(6).split('e');
   return figures((Math.floor(Number(head) * 100 + 1e-9) / 100) * 10 ** Number(exponent), 3);
 }

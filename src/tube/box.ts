@@ -16,15 +16,11 @@ export class Box {
   /** D/t over the box */
   slimLo = Number.NaN;
   slimHi = Number.NaN;
-  readonly checkedWall = new Span();
-  readonly outerRadius = new Span();
   readonly meanRadius = new Span();
   /** tc/r */
   readonly thickness = new Span();
   readonly area = new Span();
   readonly gyrationSquared = new Span();
-  readonly secondMoment = new Span();
-  readonly polarMoment = new Span();
   /** 1/I */
   readonly perSecondMoment = new Span();
   /** ro/J */
@@ -42,6 +38,16 @@ export class Box {
     this.kept = 1 - tolerance;
   }
 
+  /** I, made anew at every asking: limits go by 1/I */
+  get secondMoment(): Span {
+    return new Span().inverse(this.perSecondMoment, 1);
+  }
+
+  /** J, the same */
+  get polarMoment(): Span {
+    return new Span().inverse(this.perSecondMoment, 2);
+  }
+
   set(outerLo: number, outerHi: number, wallLo: number, wallHi: number): this {
     this.outerLo = outerLo;
     this.outerHi = outerHi;
@@ -54,11 +60,11 @@ export class Box {
   }
 
   private encloseSection(): void {
-    const { kept } = this;
-    const ro0 = this.outerLo / 2;
-    const ro1 = this.outerHi / 2;
-    const tc0 = this.wallLo * kept;
-    const tc1 = this.wallHi * kept;
+    const { kept, outerLo, outerHi, wallLo, wallHi, slimmest } = this;
+    const ro0 = outerLo / 2;
+    const ro1 = outerHi / 2;
+    const tc0 = wallLo * kept;
+    const tc1 = wallHi * kept;
     const s0 = (2 * kept) / this.slimHi;
     const s1 = (2 * kept) / this.slimLo;
     const k0 = 1 / (1 - s0 / 2);
@@ -71,40 +77,25 @@ export class Box {
     const f1 = q1 * q1 * 0.25;
     const c0 = k0 * (3 - (2 * f1) / (1 + f1));
     const c1 = k1 * (3 - (2 * f0) / (1 + f0));
-    this.checkedWall.homogeneous(tc0, tc1, 0, 0, 1);
-    this.outerRadius.homogeneous(ro0, ro1, 1, 1, 1);
     this.meanRadius.homogeneous(r0, r1, k0, k1, 1);
     this.thickness.homogeneous(q0, q1, -k1, -k0, 0);
     const g0 = r0 * r0 * 0.5 + tc0 * tc0 * 0.125;
     const g1 = r1 * r1 * 0.5 + tc1 * tc1 * 0.125;
     this.gyrationSquared.homogeneous(g0, g1, c0 - k0, c1 - k1, 2);
-    this.area.homogeneous(0, 0, k0, k1, 2);
-    this.secondMoment.homogeneous(0, 0, c0, c1, 4);
-    this.polarMoment.homogeneous(0, 0, c0, c1, 4);
-    this.perSecondMoment.homogeneous(0, 0, -c1, -c0, -4);
-    this.shearPerTorque.homogeneous(0, 0, 1 - c1, 1 - c0, -3);
-    this.takeCorners();
-  }
-
-  /** A, I, J and J/ro grow with D and with t: their ends lie at the least tube and at the greatest. */
-  private takeCorners(): void {
-    const { kept, slimmest, area, secondMoment, polarMoment, perSecondMoment, shearPerTorque } = this;
-    const ro0 = Math.max(this.outerLo, this.wallLo * slimmest) / 2;
-    const ro1 = this.outerHi / 2;
-    const tc0 = this.wallLo * kept;
-    const tc1 = Math.min(this.wallHi, this.outerHi / slimmest) * kept;
-    const r0 = ro0 - tc0 / 2;
-    const r1 = ro1 - tc1 / 2;
-    area.lo = 2 * Math.PI * r0 * tc0;
-    area.hi = 2 * Math.PI * r1 * tc1;
-    secondMoment.lo = area.lo * (r0 * r0 * 0.5 + tc0 * tc0 * 0.125);
-    secondMoment.hi = area.hi * (r1 * r1 * 0.5 + tc1 * tc1 * 0.125);
-    polarMoment.lo = 2 * secondMoment.lo;
-    polarMoment.hi = 2 * secondMoment.hi;
-    perSecondMoment.lo = 1 / secondMoment.hi;
-    perSecondMoment.hi = 1 / secondMoment.lo;
-    shearPerTorque.lo = 0.5 * ro1 * perSecondMoment.lo;
-    shearPerTorque.hi = 0.5 * ro0 * perSecondMoment.hi;
+    // A, I and J/ro grow with D and with t: their ends lie at the least tube and at the greatest
+    const roA = Math.max(outerLo, wallLo * slimmest) / 2;
+    const tcB = Math.min(wallHi, outerHi / slimmest) * kept;
+    const rA = roA - tc0 / 2;
+    const rB = ro1 - tcB / 2;
+    const areaA = 2 * Math.PI * rA * tc0;
+    const areaB = 2 * Math.PI * rB * tcB;
+    const IA = areaA * (rA * rA * 0.5 + tc0 * tc0 * 0.125);
+    const IB = areaB * (rB * rB * 0.5 + tcB * tcB * 0.125);
+    const perA = 1 / IA;
+    const perB = 1 / IB;
+    this.area.homogeneous(areaA, areaB, k0, k1, 2);
+    this.perSecondMoment.homogeneous(perB, perA, -c1, -c0, -4);
+    this.shearPerTorque.homogeneous(0.5 * ro1 * perB, 0.5 * roA * perA, 1 - c1, 1 - c0, -3);
   }
 
   /** factor × the measure, enclosed */
@@ -130,7 +121,10 @@ export class Box {
     }
   }
 
-  /** factor × measure for all measures by number: the same as above, without a branch for each. */
+  /**
+   * factor × measure for all measures by number: the same as above, without a branch for each. Measures that are powers
+   * of D and t have slopes that no box changes: they are left as `multiple` once set them.
+   */
   multiples(factors: Float64Array, out: readonly Span[]): void {
     const { outerLo, outerHi, wallLo, wallHi, slimLo, slimHi } = this;
     const stress = factors[0] as number;
@@ -143,11 +137,11 @@ export class Box {
     const perBore = factors[7] as number;
     if (stress > 0) (out[0] as Span).scaled(this.shearPerTorque, stress);
     if (moment > 0) (out[1] as Span).scaled(this.perSecondMoment, moment);
-    if (outer > 0) (out[2] as Span).homogeneous(outer * outerLo, outer * outerHi, 1, 1, 1);
-    if (perOuter > 0) (out[3] as Span).homogeneous(perOuter / outerHi, perOuter / outerLo, -1, -1, -1);
-    if (perWall > 0) (out[4] as Span).homogeneous(perWall / wallHi, perWall / wallLo, 0, 0, -1);
-    if (slim > 0) (out[5] as Span).homogeneous(slim * slimLo, slim * slimHi, 1, 1, 0);
-    if (perSlim > 0) (out[6] as Span).homogeneous(perSlim / slimHi, perSlim / slimLo, -1, -1, 0);
+    if (outer > 0) (out[2] as Span).between(outer * outerLo, outer * outerHi);
+    if (perOuter > 0) (out[3] as Span).between(perOuter / outerHi, perOuter / outerLo);
+    if (perWall > 0) (out[4] as Span).between(perWall / wallHi, perWall / wallLo);
+    if (slim > 0) (out[5] as Span).between(slim * slimLo, slim * slimHi);
+    if (perSlim > 0) (out[6] as Span).between(perSlim / slimHi, perSlim / slimLo);
     if (perBore > 0) this.perBore(perBore, out[7] as Span);
   }
 

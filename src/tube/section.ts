@@ -11,10 +11,6 @@ export class Section {
   outerDiameter = Number.NaN;
   /** nominal wall, m */
   wall = Number.NaN;
-  /** tc, m */
-  checkedWall = Number.NaN;
-  /** ro, m */
-  outerRadius = Number.NaN;
   /** r, the radius to the median line of the checked wall, m */
   meanRadius = Number.NaN;
   /** tc/r */
@@ -23,10 +19,6 @@ export class Section {
   area = Number.NaN;
   /** I/A, m² */
   gyrationSquared = Number.NaN;
-  /** I, m⁴ */
-  secondMoment = Number.NaN;
-  /** J, m⁴ */
-  polarMoment = Number.NaN;
   /** 1/I, m⁻⁴: many limits divide by it */
   perSecondMoment = Number.NaN;
   /** ro/J, m⁻³: shear stress at the surface for a unit of torque */
@@ -46,8 +38,6 @@ export class Section {
     const r = ro - tc / 2;
     this.outerDiameter = outerDiameter;
     this.wall = wall;
-    this.checkedWall = tc;
-    this.outerRadius = ro;
     this.meanRadius = r;
     this.thickness = tc / r;
     const area = 2 * Math.PI * r * tc;
@@ -56,11 +46,32 @@ export class Section {
     const perSecondMoment = 1 / secondMoment;
     this.area = area;
     this.gyrationSquared = gyrationSquared;
-    this.secondMoment = secondMoment;
-    this.polarMoment = 2 * secondMoment;
     this.perSecondMoment = perSecondMoment;
     this.shearPerTorque = 0.5 * ro * perSecondMoment;
     return this;
+  }
+
+  // what the inner loop does not ask for
+
+  /** tc, m */
+  get checkedWall(): number {
+    return this.wall * this.kept;
+  }
+
+  /** ro, m */
+  get outerRadius(): number {
+    return this.outerDiameter / 2;
+  }
+
+  /** I, m⁴ */
+  get secondMoment(): number {
+    return this.area * this.gyrationSquared;
+  }
+
+  /** J, m⁴ */
+  get polarMoment(): number {
+    const { secondMoment } = this;
+    return 2 * secondMoment;
   }
 
   /** factor × the measure */

@@ -21,7 +21,11 @@ export class Span {
   scaled(a: Span, c: number): this {
     this.lo = c * a.lo;
     this.hi = c * a.hi;
-    return this.slopesOf(a);
+    this.dLo = a.dLo;
+    this.dHi = a.dHi;
+    this.tLo = a.tLo;
+    this.tHi = a.tHi;
+    return this;
   }
 
   /** q = c/a */
@@ -37,98 +41,19 @@ export class Span {
     return this;
   }
 
-  /** q = a·b */
-  product(a: Span, b: Span): this {
-    this.lo = a.lo * b.lo;
-    this.hi = a.hi * b.hi;
-    this.dLo = a.dLo + b.dLo;
-    this.dHi = a.dHi + b.dHi;
-    this.tLo = a.tLo + b.tLo;
-    this.tHi = a.tHi + b.tHi;
-    return this;
-  }
-
-  /** q = √a */
-  root(a: Span): this {
-    this.lo = Math.sqrt(a.lo);
-    this.hi = Math.sqrt(a.hi);
-    this.dLo = 0.5 * a.dLo;
-    this.dHi = 0.5 * a.dHi;
-    this.tLo = 0.5 * a.tLo;
-    this.tHi = 0.5 * a.tHi;
-    return this;
-  }
-
-  /** q = a + b: slopes mixed by a's share of the sum */
-  sum(a: Span, b: Span): this {
-    this.mix(a, b, a.lo / (a.lo + b.hi), a.hi / (a.hi + b.lo));
-    this.lo = a.lo + b.lo;
-    this.hi = a.hi + b.hi;
-    return this;
-  }
-
-  /** q = √(a² + b²) */
-  hypotenuse(a: Span, b: Span): this {
-    const aLo = a.lo * a.lo;
-    const aHi = a.hi * a.hi;
-    const bLo = b.lo * b.lo;
-    const bHi = b.hi * b.hi;
-    this.mix(a, b, aLo / (aLo + bHi), aHi / (aHi + bLo));
-    this.lo = Math.sqrt(aLo + bLo);
-    this.hi = Math.sqrt(aHi + bHi);
-    return this;
-  }
-
-  /** q = max(a, b) */
-  greater(a: Span, b: Span): this {
-    if (a.lo >= b.hi) return this.copy(a);
-    if (b.lo >= a.hi) return this.copy(b);
-    this.lo = Math.max(a.lo, b.lo);
-    this.hi = Math.max(a.hi, b.hi);
-    this.dLo = Math.min(a.dLo, b.dLo);
-    this.dHi = Math.max(a.dHi, b.dHi);
-    this.tLo = Math.min(a.tLo, b.tLo);
-    this.tHi = Math.max(a.tHi, b.tHi);
-    return this;
+  /** Another value in [lo, hi], with the slopes as they are. */
+  between(lo: number, hi: number): void {
+    this.lo = lo;
+    this.hi = hi;
   }
 
   copy(a: Span): this {
     this.lo = a.lo;
     this.hi = a.hi;
-    return this.slopesOf(a);
-  }
-
-  /** Slopes of w·ln a + (1 − w)·ln b for a share w in [w0, w1]; the value is the caller's to set. */
-  mix(a: Span, b: Span, w0: number, w1: number): this {
-    // each end is linear in w, so it lies at w0 or at w1
-    const dLo = b.dLo + (a.dLo - b.dLo) * (a.dLo > b.dLo ? w0 : w1);
-    const dHi = b.dHi + (a.dHi - b.dHi) * (a.dHi > b.dHi ? w1 : w0);
-    const tLo = b.tLo + (a.tLo - b.tLo) * (a.tLo > b.tLo ? w0 : w1);
-    const tHi = b.tHi + (a.tHi - b.tHi) * (a.tHi > b.tHi ? w1 : w0);
-    this.dLo = dLo;
-    this.dHi = dHi;
-    this.tLo = tLo;
-    this.tHi = tHi;
-    return this;
-  }
-
-  /** Slopes of a growing function of a alone, 0 ≤ f0 ≤ dln q/dln a ≤ f1; the value is the caller's to set. */
-  growing(a: Span, f0: number, f1: number): this {
-    const { dLo, dHi, tLo, tHi } = a;
-    this.dLo = dLo * (dLo < 0 ? f1 : f0);
-    this.dHi = dHi * (dHi < 0 ? f0 : f1);
-    this.tLo = tLo * (tLo < 0 ? f1 : f0);
-    this.tHi = tHi * (tHi < 0 ? f0 : f1);
-    return this;
-  }
-
-  /** Slopes of a function of a alone, dln q/dln a in [f0, f1] of either sign; the value is the caller's to set. */
-  chain(a: Span, f0: number, f1: number): this {
-    const { dLo, dHi, tLo, tHi } = a;
-    this.dLo = Math.min(f0 * dLo, f1 * dLo, f0 * dHi, f1 * dHi);
-    this.dHi = Math.max(f0 * dLo, f1 * dLo, f0 * dHi, f1 * dHi);
-    this.tLo = Math.min(f0 * tLo, f1 * tLo, f0 * tHi, f1 * tHi);
-    this.tHi = Math.max(f0 * tLo, f1 * tLo, f0 * tHi, f1 * tHi);
+    this.dLo = a.dLo;
+    this.dHi = a.dHi;
+    this.tLo = a.tLo;
+    this.tHi = a.tHi;
     return this;
   }
 
@@ -142,14 +67,19 @@ export class Span {
     this.tHi = degree - d0;
     return this;
   }
+}
 
-  private slopesOf(a: Span): this {
-    this.dLo = a.dLo;
-    this.dHi = a.dHi;
-    this.tLo = a.tLo;
-    this.tHi = a.tHi;
-    return this;
-  }
+/**
+ * An end of w·a + (1 − w)·b, linear in w: at w where a is the greater, else at v. So sums mix the
+ * slopes of their parts: the functions here take numbers and are as short as this so that they cost no call.
+ */
+export function share(a: number, b: number, w: number, v: number): number {
+  return b + (a - b) * (a > b ? w : v);
+}
+
+/** An end of f·a, the slope of a growing function of what has the slope a: at f where a is positive, else at g. */
+export function times(a: number, f: number, g: number): number {
+  return a * (a < 0 ? g : f);
 }
 
 /** What covers the rounding of an enclosure: relative for values, absolute for logarithmic slopes. */

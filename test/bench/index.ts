@@ -16,6 +16,7 @@ import { minimise, ready, type Method } from './minimiser.js';
 import { atLeast, atMost, shown, table } from './table.js';
 import { medianTime } from './time.js';
 import { compileTwin, type Twin } from './twin.js';
+import { windowTimes } from './window.js';
 
 const KERNEL_TARGET = 0.65;
 const FRONTS_TARGET = 60;
@@ -132,3 +133,4 @@ twin?.remove();
 say(optima());
 say(fronts());
 say(await demos());
+say(await windowTimes());

@@ -57,7 +57,8 @@ function boxRound(kernel: Kernel, box: Box, outer: Float64Array, wall: Float64Ar
     let own = 0;
     for (let k = 0; k < spans.length; k++) {
       const { lo, hi, dLo, dHi, tLo, tHi } = spans[k] as Span;
-      own += lo + hi + dLo + dHi + tLo + tHi;
+      // a place that no check goes by is left out, as the twin leaves it out
+      if (hi > 0) own += lo + hi + dLo + dHi + tLo + tHi;
     }
     sum += own;
   }

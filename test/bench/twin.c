@@ -16,8 +16,8 @@ typedef struct { double lo, hi, d0, d1, t0, t1; } Span;
 typedef struct { double D, t, tc, ro, r, A, g, I, perI, stress, decay; } Section;
 typedef struct {
   double D0, D1, t0, t1, slim0, slim1;
-  Span tc, ro, r, q, A, g, I, perI, stress, phi;
-  double e0, e1; /* e^−φ at the ends of phi */
+  Span r, q, A, g, I, perI, stress;
+  double e0, e1, flattest, steepest; /* e^−φ at the ends of phi, and the least and the greatest of φe^−φ */
 } Box;
 
 typedef struct {
@@ -163,9 +163,6 @@ static inline Span inverse(Span a, double c) { return (Span){c / a.hi, c / a.lo,
 static inline Span product(Span a, Span b) {
   return (Span){a.lo * b.lo, a.hi * b.hi, a.d0 + b.d0, a.d1 + b.d1, a.t0 + b.t0, a.t1 + b.t1};
 }
-static inline Span root(Span a) {
-  return (Span){sqrt(a.lo), sqrt(a.hi), 0.5 * a.d0, 0.5 * a.d1, 0.5 * a.t0, 0.5 * a.t1};
-}
 static inline double share(double a, double b, double w, double v) { return b + (a - b) * (a > b ? w : v); }
 static inline Span mix(Span a, Span b, double w0, double w1) {
   return (Span){0, 0, share(a.d0, b.d0, w0, w1), share(a.d1, b.d1, w1, w0), share(a.t0, b.t0, w0, w1), share(a.t1, b.t1, w1, w0)};
@@ -178,11 +175,6 @@ static inline Span hypotenuse(Span a, Span b) {
   double a0 = a.lo * a.lo, a1 = a.hi * a.hi, b0 = b.lo * b.lo, b1 = b.hi * b.hi;
   Span s = mix(a, b, a0 / (a0 + b1), a1 / (a1 + b0));
   return s.lo = sqrt(a0 + b0), s.hi = sqrt(a1 + b1), s;
-}
-static inline Span chain(Span a, double f0, double f1) {
-  return (Span){0, 0,
-    least(least(f0 * a.d0, f1 * a.d0), least(f0 * a.d1, f1 * a.d1)), most(most(f0 * a.d0, f1 * a.d0), most(f0 * a.d1, f1 * a.d1)),
-    least(least(f0 * a.t0, f1 * a.t0), least(f0 * a.t1, f1 * a.t1)), most(most(f0 * a.t0, f1 * a.t0), most(f0 * a.t1, f1 * a.t1))};
 }
 static inline Span growing(Span a, double f0, double f1) {
   return (Span){0, 0, a.d0 * (a.d0 < 0 ? f1 : f0), a.d1 * (a.d1 < 0 ? f0 : f1),
@@ -202,20 +194,13 @@ static inline Span parabola_over(Span e, double p) {
   Span f = growing(e, slope(e.hi, p), slope(e.lo, p));
   return f.lo = parabola(e.lo, p), f.hi = parabola(e.hi, p), f;
 }
-static inline Span knockdown_over(const Box *b, double loss) {
-  Span phi = b->phi;
-  double p0 = phi.lo, p1 = phi.hi, h0 = p0 * b->e0, h1 = p1 * b->e1;
-  double top = p0 < 1 && p1 > 1 ? 0.36787944117144233 : most(h0, h1);
-  double hi = 1 - loss * (1 - b->e0), lo = 1 - loss * (1 - b->e1);
-  Span k = chain(phi, -loss * top / lo, -loss * least(h0, h1) / hi);
-  return k.lo = lo, k.hi = hi, k;
-}
 static inline Span amplified_over(const Box *b, double thrust) {
   if (thrust == 0) return homogeneous(1, 1, 0, 0, 0);
   Span x = scaled(b->perI, thrust);
   double x0 = least(x.lo - 4e-15, 0.999), x1 = least(x.hi + 4e-15, 0.999);
-  Span m = growing(x, x1 == 0.999 ? 0 : x0 / (1 - x0), x0 == 0.999 ? 0 : x1 / (1 - x1));
-  return m.lo = 1 / (1 - x0), m.hi = 1 / (1 - x1), m;
+  double m0 = 1 / (1 - x0), m1 = 1 / (1 - x1);
+  Span m = growing(x, x1 == 0.999 ? 0 : x0 * m0, x0 == 0.999 ? 0 : x1 * m1);
+  return m.lo = m0, m.hi = m1, m;
 }
 static inline Span strength_over(const Box *b, const Load *c, double k, double ka, double kb, double thrust) {
   Span tau = scaled(b->stress, k), sigma;
@@ -228,10 +213,12 @@ static inline Span strength_over(const Box *b, const Load *c, double k, double k
   return c->torsion ? hypotenuse(tau, sigma) : sigma;
 }
 static inline Span force_over(const Box *b, double loss) {
-  Span q = b->q, A = b->A, k = knockdown_over(b, loss);
-  double k0 = A.d0, k1 = A.d1, lo = k.lo * classical * q.lo, hi = k.hi * classical * q.hi;
-  double e0 = slope(hi, Fcy) * (1 + k.t0 / k1), e1 = slope(lo, Fcy) * (1 + k.t1 / k0);
-  double d0 = least(k0 * (1 - e1), k1 * (1 - e1)), d1 = most(k0 * (1 - e0), k1 * (1 - e0));
+  Span q = b->q, A = b->A;
+  double g0 = 1 - loss * (1 - b->e1), g1 = 1 - loss * (1 - b->e0);
+  double k0 = A.d0, k1 = A.d1, lo = g0 * classical * q.lo, hi = g1 * classical * q.hi;
+  double e0 = slope(hi, Fcy) * (1 + 0.5 * loss * b->flattest / g1);
+  double e1 = slope(lo, Fcy) * (1 + 0.5 * loss * b->steepest / g0);
+  double d0 = (1 - e1) * (1 - e1 < 0 ? k1 : k0), d1 = (1 - e0) * (1 - e0 < 0 ? k0 : k1);
   return homogeneous(A.lo * parabola(lo, Fcy), A.hi * parabola(hi, Fcy), d0, d1, 2);
 }
 static inline Span stress_over(const Box *b) {
@@ -263,18 +250,13 @@ static inline Span column_over(const Box *b, const Load *c) {
 }
 static inline Span whirl_over(const Box *b, const Load *c) {
   Span g = b->g, i = b->perI;
-  double z0 = shear * g.lo, z1 = shear * g.hi;
-  Span w = growing(g, 0.5 / (1 + z1), 0.5 / (1 + z0));
-  w.lo = stiffness * sqrt(g.lo / (1 + z0)), w.hi = stiffness * sqrt(g.hi / (1 + z1));
-  if (c->thrust || c->torsion) {
-    double p0 = c->whirlP * i.lo, p1 = c->whirlP * i.hi, t0 = c->whirlT * i.lo, t1 = c->whirlT * i.hi;
-    t0 *= t0, t1 *= t1;
-    double hi = most(1 - p0 - t0 + 1e-14, 1e-6), lo = most(1 - p1 - t1 - 1e-14, 1e-6);
-    double f0 = lo > 1e-6 ? (0.5 * p0 + t0) / hi : 0, f1 = hi > 1e-6 ? (0.5 * p1 + t1) / lo : 0;
-    Span left = growing(b->I, f0, f1);
-    left.lo = sqrt(lo), left.hi = sqrt(hi);
-    w = product(w, left);
-  }
+  double z0 = 1 / (1 + shear * g.lo), z1 = 1 / (1 + shear * g.hi);
+  double p0 = c->whirlP * i.lo, p1 = c->whirlP * i.hi, t0 = c->whirlT * i.lo, t1 = c->whirlT * i.hi;
+  t0 *= t0, t1 *= t1;
+  double hi = most(1 - p0 - t0 + 1e-14, 1e-6), lo = most(1 - p1 - t1 - 1e-14, 1e-6);
+  double f0 = lo > 1e-6 ? (0.5 * p0 + t0) / hi : 0, f1 = hi > 1e-6 ? (0.5 * p1 + t1) / lo : 0;
+  Span w = product(growing(g, 0.5 * z1, 0.5 * z0), growing(b->I, f0, f1));
+  w.lo = stiffness * sqrt(g.lo * z0 * lo), w.hi = stiffness * sqrt(g.hi * z1 * hi);
   return inverse(w, speed);
 }
 
@@ -287,7 +269,7 @@ static void set_box(Box *b, double D0, double D1, double t0, double t1) {
   double f0 = q0 * q0 * 0.25, f1 = q1 * q1 * 0.25;
   double i0 = k0 * (3 - 2 * f1 / (1 + f1)), i1 = k1 * (3 - 2 * f0 / (1 + f0));
   double g0 = r0 * r0 * 0.5 + c0 * c0 * 0.125, g1 = r1 * r1 * 0.5 + c1 * c1 * 0.125;
-  b->tc = homogeneous(c0, c1, 0, 0, 1), b->ro = homogeneous(ro0, ro1, 1, 1, 1), b->r = homogeneous(r0, r1, k0, k1, 1);
+  b->r = homogeneous(r0, r1, k0, k1, 1);
   b->q = homogeneous(q0, q1, -k1, -k0, 0), b->g = homogeneous(g0, g1, i0 - k0, i1 - k1, 2);
   double roA = most(D0, t0 * slimmest) / 2, cB = least(t1, D1 / slimmest) * kept, rA = roA - c0 / 2, rB = ro1 - cB / 2;
   double aA = 2 * PI * rA * c0, aB = 2 * PI * rB * cB;
@@ -295,7 +277,11 @@ static void set_box(Box *b, double D0, double D1, double t0, double t1) {
   b->A = homogeneous(aA, aB, k0, k1, 2), b->I = homogeneous(IA, IB, i0, i1, 4);
   b->perI = homogeneous(1 / IB, 1 / IA, -i1, -i0, -4);
   b->stress = homogeneous(0.5 * ro1 * (1 / IB), 0.5 * roA * (1 / IA), 1 - i1, 1 - i0, -3);
-  if (direct) b->phi = inverse(root(b->q), 1.0 / 16), b->e0 = exp(-b->phi.lo), b->e1 = exp(-b->phi.hi);
+  if (!direct) return;
+  double p0 = 0.0625 / sqrt(q1), p1 = 0.0625 / sqrt(q0);
+  b->e0 = exp(-p0), b->e1 = exp(-p1);
+  double h0 = p0 * b->e0, h1 = p1 * b->e1;
+  b->flattest = least(h0, h1), b->steepest = p0 < 1 && p1 > 1 ? 0.36787944117144233 : most(h0, h1);
 }
 
 static inline double total(Span s) { return s.lo + s.hi + s.d0 + s.d1 + s.t0 + s.t1; }

@@ -35,7 +35,10 @@ describe('the imports of the whole tree', () => {
 
   it('are read: values and types, from engine, renderer and tests', () => {
     expect(imports.get('test/lint/imports.test.ts')).toEqual(['test/lint/imports.ts']);
-    expect(imports.get('test/renderer/theme/tokens.test.ts')).toEqual(['renderer/theme/tokens.ts']);
+    expect(imports.get('test/renderer/theme/tokens.test.ts')).toEqual([
+      'src/figure/marker.ts',
+      'renderer/theme/tokens.ts',
+    ]);
     expect(imports.get('src/report/report.ts')).toContain('src/job/job.ts');
     expect(imports.get('test/lint/layers.test.ts')).toEqual(['eslint.layers.js']);
   });

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { conflictWords, easeLines, lastResort, requirementTerm } from '../../../renderer/pick/conflict.js';
+import { easeLines, lastResort, requirementTerm } from '../../../renderer/pick/conflict.js';
+import { conflictWords } from '../../../src/report/noFit.js';
 import type { NoFit } from '../../../src/report/report.js';
 
 const job = { loads: [{ name: 'jam' }, { name: 'cruise' }] };

@@ -4,8 +4,6 @@ import { Section } from '../../../src/tube/section.js';
 import type { Span } from '../../../src/tube/span.js';
 
 const QUANTITIES = [
-  'checkedWall',
-  'outerRadius',
   'meanRadius',
   'area',
   'gyrationSquared',

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { OUTWARD, Span } from '../../../src/tube/span.js';
+import { OUTWARD, share, Span, times } from '../../../src/tube/span.js';
 
 /** A power law c·D^m·t^n over the box D, t ∈ [1, w]: its enclosure is known exactly. */
 interface Power {
@@ -36,11 +36,6 @@ interface Operation {
 const OPERATIONS: readonly Operation[] = [
   { name: 'scaled', over: (out, a) => out.scaled(a, 2.5), at: (a) => 2.5 * a },
   { name: 'inverse', over: (out, a) => out.inverse(a, 2.5), at: (a) => 2.5 / a },
-  { name: 'product', over: (out, a, b) => out.product(a, b), at: (a, b) => a * b },
-  { name: 'root', over: (out, a) => out.root(a), at: Math.sqrt },
-  { name: 'sum', over: (out, a, b) => out.sum(a, b), at: (a, b) => a + b },
-  { name: 'hypotenuse', over: (out, a, b) => out.hypotenuse(a, b), at: Math.hypot },
-  { name: 'greater', over: (out, a, b) => out.greater(a, b), at: Math.max },
   { name: 'copy', over: (out, a) => out.copy(a), at: (a) => a },
 ];
 
@@ -106,17 +101,11 @@ describe.each(OPERATIONS)('Span.$name', ({ over, at }) => {
   });
 });
 
-describe('Span.chain', () => {
-  it('takes slopes of either sign on either side', () => {
-    const a = new Span().homogeneous(1, 2, -2, 3, 1);
-    const out = new Span().chain(a, -1, 0.5);
-    expect([out.dLo, out.dHi]).toEqual([-3, 2]);
-    expect([out.tLo, out.tHi]).toEqual([-3, 2]);
-  });
-
-  it('may be written over its argument', () => {
-    const a = new Span().homogeneous(1, 2, -2, 3, 1);
-    expect(fields(a.chain(a, 2, 2)).slice(2)).toEqual([-4, 6, -4, 6]);
+describe('Span.between', () => {
+  it('takes other values and keeps the slopes', () => {
+    const span = new Span().homogeneous(1, 2, -2, 3, 1);
+    span.between(4, 5);
+    expect(fields(span)).toEqual([4, 5, -2, 3, -2, 3]);
   });
 });
 
@@ -126,10 +115,17 @@ describe('Span.homogeneous', () => {
   });
 });
 
-describe('Span.mix', () => {
-  it('weighs the slopes by the share of the first', () => {
-    const a = new Span().homogeneous(1, 1, 2, 2, 2);
-    const b = new Span().homogeneous(1, 1, 0, 0, 2);
-    expect(fields(new Span().mix(a, b, 0.25, 0.75)).slice(2)).toEqual([0.5, 1.5, 0.5, 1.5]);
+describe('share', () => {
+  it('mixes two slopes, at one share or at the other by which is the greater', () => {
+    expect(share(2, 0, 0.25, 0.75)).toBe(0.5);
+    expect(share(0, 2, 0.25, 0.75)).toBe(0.5);
+    expect(share(3, 3, 0.25, 0.75)).toBe(3);
+  });
+});
+
+describe('times', () => {
+  it('takes one factor where the slope is positive and the other where it is negative', () => {
+    expect([times(2, 3, 5), times(-2, 3, 5)]).toEqual([6, -10]);
+    expect(Math.abs(times(0, 3, 5))).toBe(0);
   });
 });
