@@ -43,17 +43,22 @@ function rowOf(entry: unknown, index: number | null, library: ReadonlyMap<string
 /**
  * The materials of the job with those of the library that are to be shown beside them, by family. Families come in the
  * order in which job and library first name them.
- * @param extra ids of unticked materials to show
+ * @param unticked entries to show though the job no longer lists them, by id
+ * @param all whether to show the whole library
  */
 export function materialGroups(
   entries: readonly unknown[],
   library: ReadonlyMap<string, Metal>,
-  extra: (id: string) => boolean,
+  unticked: ReadonlyMap<string, unknown>,
+  all: boolean,
 ): readonly MaterialGroup[] {
   const ticked = entries.map((entry, index) => rowOf(entry, index, library));
   const own = new Set(ticked.map(({ id }) => id));
   const order = Array.from(library.keys());
-  const rest = order.filter((id) => !own.has(id) && extra(id)).map((id) => rowOf(id, null, library));
+  const shown = [...(all ? order : order.filter((id) => unticked.has(id))), ...unticked.keys()];
+  const rest = Array.from(new Set(shown))
+    .filter((id) => !own.has(id))
+    .map((id) => rowOf(unticked.get(id) ?? id, null, library));
   const place = ({ id, index }: MaterialRow): number =>
     library.has(id) ? order.indexOf(id) : order.length + (index ?? 0);
   const rows = [...ticked, ...rest];

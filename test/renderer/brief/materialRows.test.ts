@@ -10,7 +10,7 @@ const own = { id: 'mine', name: 'Steel of my own', family: 'steel' };
 
 describe('materialGroups', () => {
   it('has the job’s materials by family, each with its place in the job', () => {
-    const groups = materialGroups(['steel-4130-n', own, 'al-6061-t6', 'al-2024-t3'], library, () => false);
+    const groups = materialGroups(['steel-4130-n', own, 'al-6061-t6', 'al-2024-t3'], library, new Map(), false);
     expect(groups.map(({ family, rows }) => [family, rows.map(({ id, index }) => [id, index])])).toEqual([
       [
         'steel',
@@ -30,14 +30,28 @@ describe('materialGroups', () => {
   });
 
   it('has the library beside them on demand', () => {
-    const groups = materialGroups(['al-6061-t6'], library, () => true);
+    const groups = materialGroups(['al-6061-t6'], library, new Map(), true);
     expect(groups.flatMap(({ rows }) => rows)).toHaveLength(library.size);
     const [aluminium] = groups;
     expect(aluminium?.rows.map(({ index }) => index)).toEqual([null, 0, null]);
   });
 
   it('shows an entry that says nothing of itself by its id', () => {
-    expect(materialGroups(['unheard-of'], library, () => false)[0]?.rows[0]?.name).toBe('unheard-of');
+    expect(materialGroups(['unheard-of'], library, new Map(), false)[0]?.rows[0]?.name).toBe('unheard-of');
+  });
+
+  it('keep in sight what was unticked, the job’s own records too', () => {
+    const own = { id: 'mill', name: 'Mill steel', family: 'steel' };
+    const unticked = new Map<string, unknown>([
+      ['mill', own],
+      ['al-2024-t3', 'al-2024-t3'],
+    ]);
+    const rows = materialGroups(['al-6061-t6'], library, unticked, false).flatMap((group) => group.rows);
+    expect(rows.map(({ id, index }) => [id, index])).toEqual([
+      ['al-2024-t3', null],
+      ['al-6061-t6', 0],
+      ['mill', null],
+    ]);
   });
 });
 
