@@ -1,5 +1,6 @@
 import type { Problem } from '../src/material/problem.js';
-import type { Candidate, Report } from '../src/report/report.js';
+import type { Candidate, DesignCheck, Report } from '../src/report/report.js';
+import type { OwnPoint } from '../src/sizing/dominance.js';
 
 /** What the window needs to begin with. Documents are as their files hold them; the window reads them with the engine. */
 export interface Beginning {
@@ -21,6 +22,8 @@ export type SizeUpdate =
   | { readonly kind: 'progress'; readonly done: number; readonly of: number; readonly material: string }
   /** a material is done; its candidate is final, its front is still to come */
   | { readonly kind: 'candidate'; readonly candidate: Candidate }
+  /** a material's front is found; its points are not yet held against those of the others */
+  | { readonly kind: 'front'; readonly material: string; readonly points: readonly OwnPoint[] }
   /** the worker died and was started again; the run begins anew */
   | { readonly kind: 'restarted'; readonly reason: string };
 
@@ -36,11 +39,29 @@ export type SizeEnd =
   /** the worker died more often than it was worth starting again, or the host failed */
   | { readonly kind: 'failed'; readonly sentence: string };
 
+/** A tube of any size to be checked against a job document. */
+export interface CheckArguments {
+  readonly job: unknown;
+  /** id of a material of the job */
+  readonly material: string;
+  /** m */
+  readonly outerDiameter: number;
+  /** m; less than half of the outer diameter */
+  readonly wall: number;
+}
+
+/** What a check gives: how the tube fares, or why the job cannot be read. */
+export type CheckAnswer =
+  | { readonly kind: 'checked'; readonly check: DesignCheck }
+  | { readonly kind: 'refused'; readonly problems: readonly Problem[] };
+
 /** Calls that answer once. */
 export interface Asks {
   begin: (args: null) => Beginning;
   /** keeps the window's state through a restart: any JSON value of at most 4 MB */
   remember: (state: unknown) => null;
+  /** checks one tube of one material of a job, as a design in hand is checked; a run in flight is not disturbed */
+  check: (args: CheckArguments) => CheckAnswer;
 }
 
 /** Calls that stream updates until they end, and can be stopped. */
@@ -69,7 +90,7 @@ export interface Desk {
 }
 
 /** Names of all calls, for a host to check what it is asked. */
-export const ASKS = ['begin', 'remember'] as const satisfies readonly AskName[];
+export const ASKS = ['begin', 'remember', 'check'] as const satisfies readonly AskName[];
 export const FOLLOWS = ['size'] as const satisfies readonly FollowName[];
 
 /** A host's refusal, as it crosses to the window: a stable code and a sentence. */

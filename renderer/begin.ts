@@ -6,6 +6,7 @@ import { useDemos } from './stores/demos.js';
 import { useJob } from './stores/job.js';
 import { useRun } from './stores/run.js';
 import { useSettings } from './stores/settings.js';
+import { useTrial } from './stores/trial.js';
 
 /** How long changes gather before they are remembered, ms. */
 export const REMEMBER_WAIT = 500;
@@ -20,6 +21,7 @@ export async function beginWith(desk: Desk): Promise<void> {
   if (kept !== null) useSettings().restore(kept.settings);
   useJob().begin(records, stockLists, kept?.job ?? first, kept?.sound ?? first);
   keepRemembering(desk);
+  useTrial().connect(desk);
   useRun().connect(desk);
 }
 

@@ -1,4 +1,4 @@
-import type { Follows } from '../contract.js';
+import type { CheckArguments, Follows } from '../contract.js';
 import { jsonText } from './json.js';
 import { Refused } from './refused.js';
 
@@ -26,4 +26,24 @@ export function sizeArguments(args: unknown): Follows['size']['args'] {
   const job = own.get('job');
   jsonText(job, 'The job');
   return { job };
+}
+
+const CHECK_KEYS = ['job', 'material', 'outerDiameter', 'wall'] as const;
+
+/**
+ * The arguments of `check`: a job document, the id of a material and the size of a tube, m, and nothing else.
+ * @throws Refused
+ */
+export function checkArguments(args: unknown): CheckArguments {
+  if (typeof args !== 'object' || args === null || Array.isArray(args)) throw bad('Expected an object with a job.');
+  const own = new Map<string, unknown>(Object.entries(args));
+  if (own.size !== CHECK_KEYS.length || !CHECK_KEYS.every((key) => own.has(key)))
+    throw bad('Expected a job, a material, an outerDiameter and a wall, and nothing else.');
+  const [job, material, outerDiameter, wall] = CHECK_KEYS.map((key) => own.get(key));
+  jsonText(job, 'The job');
+  if (typeof material !== 'string') throw bad('The material is not the id of one.');
+  if (typeof outerDiameter !== 'number' || typeof wall !== 'number') throw bad('The size is not in numbers.');
+  if (!Number.isFinite(outerDiameter) || !(wall > 0 && wall < outerDiameter / 2))
+    throw bad('Expected a wall above 0 and under half of the outer diameter.');
+  return { job, material, outerDiameter, wall };
 }

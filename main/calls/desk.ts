@@ -1,6 +1,7 @@
 import path from 'node:path';
 import type { WorkerEntry } from '../solver/entry.js';
 import { Runner } from '../solver/runner.js';
+import { tubeChecker } from './check.js';
 import { fileMemory } from './memory.js';
 import { serveWindow, type Service } from './service.js';
 import { readShipped } from './shipped.js';
@@ -31,13 +32,14 @@ export interface Desk {
 /** Reads what is shipped and makes the desk ready. */
 export async function openDesk({ worker, folder, log }: DeskOptions): Promise<Desk> {
   const shipped = await readShipped();
+  const check = tubeChecker(shipped);
   const memory = fileMemory(path.join(folder, 'state.json'), 'The state', log);
   return {
     settled: () => memory.settled(),
     openWindow: () => {
       const runner = new Runner({ entry: worker, library: shipped });
       runner.warm(shipped.demos[0]);
-      const means = { shipped, memory, runner };
+      const means = { shipped, memory, runner, check };
       return { ...serveWindow(askWork(means), followWork(means), log), close: () => runner.close() };
     },
   };

@@ -1,6 +1,6 @@
-import type { AskName, Asks, Followed, FollowName, Follows } from '../contract.js';
+import type { AskName, Asks, CheckAnswer, CheckArguments, Followed, FollowName, Follows } from '../contract.js';
 import type { Runner } from '../solver/runner.js';
-import { noArguments, sizeArguments } from './arguments.js';
+import { checkArguments, noArguments, sizeArguments } from './arguments.js';
 import type { Memory } from './memory.js';
 import type { Shipped } from './shipped.js';
 
@@ -20,10 +20,12 @@ export interface WindowMeans {
   readonly shipped: Shipped;
   readonly memory: Memory;
   readonly runner: Runner;
+  /** checks one tube against a job */
+  readonly check: (args: CheckArguments) => CheckAnswer;
 }
 
 /** The work behind each ask of a window. Each throws Refused where its arguments are wrong. */
-export function askWork({ shipped, memory }: WindowMeans): AskWork {
+export function askWork({ shipped, memory, check }: WindowMeans): AskWork {
   return {
     begin: async (args) => {
       noArguments(args);
@@ -33,6 +35,10 @@ export function askWork({ shipped, memory }: WindowMeans): AskWork {
       await memory.keep(state);
       return null;
     },
+    check: (args) =>
+      new Promise((resolve) => {
+        resolve(check(checkArguments(args)));
+      }),
   };
 }
 

@@ -45,5 +45,10 @@ export function exposedTo(ipc: PreloadIpc): Exposed {
     (channel: string) =>
     (args: unknown): Promise<never> =>
       ipc.invoke(channel, plain(args)) as Promise<never>;
-  return { begin: ask(channelOfAsk('begin')), remember: ask(channelOfAsk('remember')), size };
+  return {
+    begin: ask(channelOfAsk('begin')),
+    remember: ask(channelOfAsk('remember')),
+    check: ask(channelOfAsk('check')),
+    size,
+  };
 }

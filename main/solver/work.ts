@@ -20,7 +20,7 @@ function sizeBrief(brief: Brief, isWanted: () => boolean, tell: (update: SizeUpd
     if (step < last) tell(progress(brief, step));
     const { done, value } = steps.next();
     if (done) return { kind: 'report', report: value };
-    if (value.kind === 'candidate') tell({ kind: 'candidate', candidate: value.candidate });
+    tell(value);
   }
   return null;
 }

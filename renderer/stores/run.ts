@@ -2,6 +2,8 @@ import { defineStore } from 'pinia';
 import { computed, ref, shallowRef, watch } from 'vue';
 import type { Desk, Followed, SizeEnd, SizeUpdate } from '../../main/contract.js';
 import type { Candidate, Report } from '../../src/report/report.js';
+import type { OwnPoint } from '../../src/sizing/dominance.js';
+import { shownFront, type ShownFront } from '../job/shownFront.js';
 import { shownResults, type Results } from '../job/shownResults.js';
 import { useJob, type Sound } from './job.js';
 
@@ -35,6 +37,7 @@ export const useRun = defineStore('run', () => {
   const sized = shallowRef<Sound | null>(null);
   const asked = shallowRef<Sound | null>(null);
   const partial = shallowRef<readonly Candidate[]>([]);
+  const fronts = shallowRef<ReadonlyMap<string, readonly OwnPoint[]>>(new Map());
 
   let desk: Desk | null = null;
   let followed: Followed<SizeEnd> | null = null;
@@ -47,18 +50,26 @@ export const useRun = defineStore('run', () => {
   const stale = computed(
     () => outdated.value && (slow.value || status.value === 'stopped' || status.value === 'failed'),
   );
+  /** whether what has come of the run in flight is shown, and not the last report alone */
+  const comingIn = computed(() => stale.value || report.value === null);
+  const inFlight = computed(() => (comingIn.value ? (asked.value?.brief.job ?? null) : null));
   const shown = computed<Results | null>(() =>
-    stale.value || report.value === null
-      ? shownResults(report.value, partial.value, asked.value?.brief.job ?? null)
-      : shownResults(report.value, [], null),
+    shownResults(report.value, comingIn.value ? partial.value : [], inFlight.value),
   );
+  const front = computed<ShownFront | null>(() => shownFront(report.value, fronts.value, inFlight.value));
+
+  function forget(): void {
+    partial.value = [];
+    fronts.value = new Map();
+  }
 
   function hear(update: SizeUpdate): void {
     if (update.kind === 'progress') progress.value = { done: update.done, of: update.of, material: update.material };
     else if (update.kind === 'candidate') partial.value = [...partial.value, update.candidate];
+    else if (update.kind === 'front') fronts.value = new Map(fronts.value).set(update.material, update.points);
     else {
       sentence.value = update.reason;
-      partial.value = [];
+      forget();
     }
   }
 
@@ -76,7 +87,7 @@ export const useRun = defineStore('run', () => {
       elapsed.value = (performance.now() - begun) / 1000;
       report.value = end.report;
       sized.value = asked.value;
-      partial.value = [];
+      forget();
       settle('done', null);
     } else if (end.kind === 'refused') settle('failed', end.problems[0]?.message ?? 'The job was refused.');
     else if (end.kind === 'failed') settle('failed', end.sentence);
@@ -101,7 +112,7 @@ export const useRun = defineStore('run', () => {
     asked.value = job.lastSound;
     status.value = 'running';
     progress.value = null;
-    partial.value = [];
+    forget();
     sentence.value = null;
     begun = performance.now();
     clearTimeout(slowing);
@@ -135,6 +146,8 @@ export const useRun = defineStore('run', () => {
     stale,
     /** what the stations show: the report, or what has come of the run so far with old results in between */
     shown,
+    /** every material's front, as far as it is known; null before there is a job */
+    front,
     /** Takes the desk that sizes, and sizes what there is. */
     connect(from: Desk): void {
       desk = from;

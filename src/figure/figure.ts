@@ -1,8 +1,8 @@
 /** The colours that a figure may ask for, by the names of the palette; a painter knows what they look like. */
-export type Tone = 'paper' | 'ink' | 'ink2' | 'rule' | 'hair' | 'copper';
+export type Tone = 'paper' | 'ink' | 'ink2' | 'rule' | 'hair' | 'faintFill' | 'copper';
 
-/** How a line is drawn: whole, long-short for axes, dashed for what is not there but must stay free. */
-export type Stroke = 'solid' | 'centre' | 'dashed';
+/** How a line is drawn: whole, long-short for axes, dashed for what is not there but must stay free, dotted for equal mass, crossed for a cross-hair. */
+export type Stroke = 'solid' | 'centre' | 'dashed' | 'dotted' | 'crossed';
 
 interface Drawn {
   /** colour of the line; none where left out */

@@ -94,13 +94,18 @@ export interface Candidate {
   readonly noFit: NoFit | null;
 }
 
-export interface HeldResult {
-  readonly name: string;
+/** A tube of any size, checked as it is. */
+export interface DesignCheck {
   readonly material: string;
   readonly feasible: boolean;
   readonly design: Design;
   readonly limits: readonly LimitEntry[];
   readonly flags: readonly Flag[];
+}
+
+/** A design in hand, checked as it is. */
+export interface HeldResult extends DesignCheck {
+  readonly name: string;
 }
 
 export interface FrontPoint {

@@ -2,7 +2,7 @@ import { jobDigest } from '../job/digest.js';
 import type { Brief, Pick } from '../job/job.js';
 import type { Candidate, HeldResult, Report } from '../report/report.js';
 import { ENGINE_VERSION } from '../job/version.js';
-import { type OwnPoint, withDominance } from './front.js';
+import { type OwnPoint, withDominance } from './dominance.js';
 import { preferred } from './stock.js';
 
 /** The report of all materials that were sized, their fronts, and all designs in hand. */

@@ -1,7 +1,7 @@
-import type { Brief } from '../job/job.js';
+import type { Brief, Job } from '../job/job.js';
 import { limitEntries } from '../limit/entries.js';
 import type { Metal } from '../material/material.js';
-import type { Candidate, Flag, HeldResult, NoFit } from '../report/report.js';
+import type { Candidate, DesignCheck, Flag, HeldResult, NoFit } from '../report/report.js';
 import { conflict } from './conflict.js';
 import { designOf } from './design.js';
 import { eases, torqueFactor } from './ease.js';
@@ -60,10 +60,18 @@ export function checkHeld({ job }: Brief): HeldResult[] {
   return job.hold.flatMap(({ name, material, outerDiameter, wall }) => {
     const metal = job.materials.find(({ id }) => id === material);
     if (metal === undefined) return [];
-    const problem = new Problem(job, metal);
-    const feasible = problem.passes(outerDiameter, wall);
-    const limits = limitEntries(job, problem.checks, problem.section.set(outerDiameter, wall));
-    const design = designOf(job, metal, outerDiameter, wall, null);
-    return [{ name, material, feasible, design, limits, flags: flagsOf(job, metal, outerDiameter, wall) }];
+    return [{ name, ...checkDesign(job, metal, outerDiameter, wall) }];
   });
+}
+
+/**
+ * A tube of any size, m, checked as it is, whatever sizes the job allows.
+ * Needs 0 < wall < outerDiameter/2.
+ */
+export function checkDesign(job: Job, metal: Metal, outerDiameter: number, wall: number): DesignCheck {
+  const problem = new Problem(job, metal);
+  const feasible = problem.passes(outerDiameter, wall);
+  const limits = limitEntries(job, problem.checks, problem.section.set(outerDiameter, wall));
+  const design = designOf(job, metal, outerDiameter, wall, null);
+  return { material: metal.id, feasible, design, limits, flags: flagsOf(job, metal, outerDiameter, wall) };
 }

@@ -1,17 +1,15 @@
 import type { FrontAxis, Job } from '../job/job.js';
 import { limitEntries } from '../limit/entries.js';
 import type { Metal } from '../material/material.js';
-import type { Design, FrontPoint } from '../report/report.js';
+import type { Design } from '../report/report.js';
 import { designOf } from './design.js';
+import { beatenPoints, type OwnPoint, tradedOf } from './dominance.js';
 import { ladder, OPEN_END } from './ladder.js';
 import { least } from './least.js';
 import { Problem } from './problem.js';
 import { sizesOf, solve, tubesOf } from './solve.js';
 import { passing, type Size } from './stock.js';
 import { type Traded, tradedDiameter, tradedTwist } from './traded.js';
-
-/** A point of one material's front, before it is compared with the others. */
-export type OwnPoint = Omit<FrontPoint, 'dominated'>;
 
 /**
  * The last rung stands this much before the least that any tube reaches: at the very end a single size is left, and
@@ -77,32 +75,9 @@ function pointOf(job: Job, metal: Metal, size: Size, rung: Job): OwnPoint {
   return { material: metal.id, mass, twist, outerDiameter, wall, layup: null, cost, governs, meetsJob };
 }
 
-const KEYS = { twist: 'twist', outerDiameter: 'outerDiameter', cost: 'cost' } as const satisfies Record<
-  FrontAxis,
-  keyof OwnPoint
->;
-
-/** Marks every point that another beats: no heavier and no worse in the traded quantity, and better in one. */
-export function withDominance(points: readonly OwnPoint[], against: FrontAxis): FrontPoint[] {
-  const beaten = beatenPoints(points, against);
-  return points.map((point) => ({ ...point, dominated: beaten.has(point) }));
-}
-
-function beatenPoints(points: readonly OwnPoint[], against: FrontAxis): ReadonlySet<OwnPoint> {
-  const traded = (point: OwnPoint): number => point[KEYS[against]] ?? Number.POSITIVE_INFINITY;
-  const beaten = new Set<OwnPoint>();
-  let lightest: OwnPoint | null = null;
-  for (const point of points.toSorted((a, b) => traded(a) - traded(b) || a.mass - b.mass)) {
-    const same = lightest !== null && point.mass === lightest.mass && traded(point) === traded(lightest);
-    if (lightest !== null && point.mass >= lightest.mass && !same) beaten.add(point);
-    else lightest = point;
-  }
-  return beaten;
-}
-
 /** The points that no other beats, from the loosest rung to the tightest. */
 function unbeaten(points: readonly OwnPoint[], against: FrontAxis): OwnPoint[] {
   const beaten = beatenPoints(points, against);
-  const traded = (point: OwnPoint): number => point[KEYS[against]] ?? 0;
+  const traded = (point: OwnPoint): number => tradedOf(point, against) ?? 0;
   return points.filter((point) => !beaten.has(point)).sort((a, b) => traded(b) - traded(a));
 }

@@ -10,7 +10,8 @@ export interface Objective {
 
 /** ρ·π(ro² − (ro − t)²)·L = ρπL·t(D − t), kg: the nominal wall, since that is what is bought. */
 export class Mass implements Objective {
-  private readonly perArea = Number.NaN;
+  /** ρπL, kg/m² */
+  readonly perArea = Number.NaN;
 
   /**
    * @param density ρ, kg/m³

@@ -2,11 +2,13 @@ import type { Brief } from '../job/job.js';
 import type { Candidate, Report } from '../report/report.js';
 import { assemble } from './assemble.js';
 import { checkHeld, sizeMaterial } from './candidate.js';
+import type { OwnPoint } from './dominance.js';
 import { frontOf } from './front.js';
 
-/** What a run has just done: one material sized, or one material's front found. */
+/** What a run has just done: one material sized, or one material's front found, its points not yet held against others. */
 export type Step =
-  { readonly kind: 'candidate'; readonly candidate: Candidate } | { readonly kind: 'front'; readonly material: string };
+  | { readonly kind: 'candidate'; readonly candidate: Candidate }
+  | { readonly kind: 'front'; readonly material: string; readonly points: readonly OwnPoint[] };
 
 /** Is told, as each material is begun, how many are done, of how many, and which is next. */
 export type Progress = (done: number, of: number, material: string) => void;
@@ -25,8 +27,9 @@ export function* sizeSteps(brief: Brief): Generator<Step, Report, undefined> {
   }
   const fronts = [];
   for (const [index, metal] of job.materials.entries()) {
-    fronts.push(...frontOf(job, metal, candidates[index]?.design ?? null));
-    yield { kind: 'front', material: metal.id };
+    const points = frontOf(job, metal, candidates[index]?.design ?? null);
+    fronts.push(...points);
+    yield { kind: 'front', material: metal.id, points };
   }
   return assemble(brief, candidates, fronts, checkHeld(brief));
 }

@@ -28,11 +28,14 @@ function press(key: string, more: KeyboardEventInit = {}): void {
   target.dispatchEvent(new KeyboardEvent('keydown', { key, bubbles: true, cancelable: true, ...more }));
 }
 
-const station = (): string | null => document.activeElement?.getAttribute('aria-label') ?? null;
+const station = (): string | null =>
+  document.activeElement?.closest('[data-station]')?.getAttribute('aria-label') ?? null;
 
-it('shows brief, pick and line-up of a sized job', () => {
+it('shows brief, front, wall map, pick and line-up of a sized job', () => {
   expect(app.findAll('[data-station]').map((one) => one.attributes('aria-label'))).toEqual([
     'Brief',
+    'Front',
+    'Wall map',
     'Pick',
     'Line-up',
   ]);
@@ -41,6 +44,10 @@ it('shows brief, pick and line-up of a sized job', () => {
 
 it('goes to a station by its number, and walks round', () => {
   press('2', { altKey: true, code: 'Digit2' });
+  expect(station()).toBe('Front');
+  press('3', { altKey: true, code: 'Digit3' });
+  expect(station()).toBe('Wall map');
+  press('4', { altKey: true, code: 'Digit4' });
   expect(station()).toBe('Pick');
   press('F6');
   expect(station()).toBe('Line-up');

@@ -1,10 +1,11 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { createPinia, setActivePinia } from 'pinia';
-import type { Desk, Follows, SizeEnd, SizeUpdate } from '../../main/contract.js';
+import type { CheckAnswer, CheckArguments, Desk, Follows, SizeEnd, SizeUpdate } from '../../main/contract.js';
 import { documentOf, type JobDocument } from '../../renderer/job/keyPath.js';
 import { useJob } from '../../renderer/stores/job.js';
 import { readJob } from '../../src/job/read.js';
 import { buildLibrary, buildStockLists, rowsById } from '../../src/material/library.js';
+import { checkDesign } from '../../src/sizing/candidate.js';
 import { sizeSteps } from '../../src/sizing/size.js';
 
 /** The JSON files of a folder of assets/, by the order of their names; tests run at the root of the tree. */
@@ -42,6 +43,15 @@ export function begin(first: JobDocument = smallJob()): ReturnType<typeof useJob
   return job;
 }
 
+/** What a desk answers to a check. */
+function checked({ job, material, outerDiameter, wall }: CheckArguments): CheckAnswer {
+  const read = readJob(job, library, stock);
+  if (!read.ok) return { kind: 'refused', problems: read.problems };
+  const metal = read.brief.job.materials.find(({ id }) => id === material);
+  if (metal === undefined) throw new Error('The material is none of this job.');
+  return { kind: 'checked', check: checkDesign(read.brief.job, metal, outerDiameter, wall) };
+}
+
 /** A run that a test leads by the hand. */
 export interface LedRun {
   readonly job: JobDocument;
@@ -62,6 +72,7 @@ export function ledDesk(): Desk & { readonly runs: LedRun[]; readonly remembered
     ask: (name: string, args: unknown): Promise<never> => {
       if (name === 'remember') remembered.push(args);
       const begun = { version: '0', records: RECORDS, stockLists: LISTS, demos: DEMOS, remembered: desk.beginning };
+      if (name === 'check') return Promise.resolve(checked(args as CheckArguments) as never);
       return Promise.resolve((name === 'begin' ? begun : null) as never);
     },
     follow: (_: string, args: Follows['size']['args'], onUpdate: (update: SizeUpdate) => void) => {
@@ -91,7 +102,7 @@ export function sized(document: JobDocument): { readonly updates: readonly SizeU
   for (;;) {
     const step = steps.next();
     if (step.done === true) return { updates, end: { kind: 'report', report: step.value } };
-    if (step.value.kind === 'candidate') updates.push(step.value);
+    updates.push(step.value);
   }
 }
 

@@ -21,7 +21,7 @@ async function* linesOf(response: Response): AsyncGenerator<string> {
   const decoder = new TextDecoder();
   let rest = '';
   for await (const part of response.body ?? []) {
-    const lines = (rest + decoder.decode(part as Uint8Array, { stream: true })).split('\n');
+    const lines = (rest + decoder.decode(part, { stream: true })).split('\n');
     rest = lines.pop() ?? '';
     yield* lines;
   }

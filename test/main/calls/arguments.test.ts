@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { noArguments, sizeArguments } from '../../../main/calls/arguments.js';
+import { checkArguments, noArguments, sizeArguments } from '../../../main/calls/arguments.js';
 
 it('none are null', () => {
   expect(noArguments(null)).toBeNull();
@@ -16,3 +16,26 @@ it.each([[null], [[]], [1], [{}], [{ job: 1, run: 2 }], [{ job: undefined }], [{
     expect(() => sizeArguments(args)).toThrow();
   },
 );
+
+const TUBE = { job: {}, material: 'al', outerDiameter: 0.09, wall: 0.002 };
+
+it('of a check are a job, a material and a tube that has a bore', () => {
+  expect(checkArguments(TUBE)).toEqual(TUBE);
+});
+
+it.each([
+  [null],
+  [[]],
+  [{}],
+  [{ ...TUBE, more: 1 }],
+  [{ ...TUBE, job: () => 1 }],
+  [{ ...TUBE, material: 1 }],
+  [{ ...TUBE, wall: '2 mm' }],
+  [{ ...TUBE, wall: 0 }],
+  [{ ...TUBE, wall: -1 }],
+  [{ ...TUBE, wall: 0.045 }],
+  [{ ...TUBE, wall: NaN }],
+  [{ ...TUBE, outerDiameter: Infinity }],
+])('of a check are refused where they are %j', (args) => {
+  expect(() => checkArguments(args)).toThrow();
+});

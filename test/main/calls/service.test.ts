@@ -8,7 +8,7 @@ function served(own: { asks?: Partial<AskWork>; follows?: Partial<FollowWork> })
   const none = (): never => {
     throw new Error('not called');
   };
-  const asks: AskWork = { begin: none, remember: none, ...own.asks };
+  const asks: AskWork = { begin: none, remember: none, check: none, ...own.asks };
   const follows: FollowWork = { size: none, ...own.follows };
   return { service: serveWindow(asks, follows, (line) => log.push(line)), log };
 }

@@ -1,6 +1,6 @@
 import { describe, expect, it, onTestFinished } from 'vitest';
 import type { Desk, Refusal, SizeUpdate } from '../../../main/contract.js';
-import { readJob, sizeJob } from '../../../src/index.js';
+import { readJob, sizeJob, type Report } from '../../../src/index.js';
 import { loadLibrary } from '../../../main/files/library.js';
 import { jobOf, loadCases, metals } from '../solver/jobs.js';
 import { temporaryFolder } from '../temporary.js';
@@ -86,6 +86,43 @@ export function testContract(name: string, openHosted: OpenHosted): void {
       expect(updates.filter(({ kind }) => kind === 'candidate')).toHaveLength(3);
       expect(updates[0]).toMatchObject({ kind: 'progress', done: 0, of: 3 });
       expect(end).toEqual({ kind: 'report', report: await expectedReport(jobOf()) });
+    });
+
+    it('streams the fronts of a run, material by material', async () => {
+      const updates: SizeUpdate[] = [];
+      const end = await (await open()).follow('size', { job: jobOf() }, (update) => updates.push(update)).done;
+      const fronts = updates.flatMap((update) => (update.kind === 'front' ? [update] : []));
+      const points = end.kind === 'report' ? end.report.front.points : [];
+      expect(fronts.map(({ material }) => material)).toEqual(jobOf()['materials']);
+      const own = fronts.flatMap((front) => front.points);
+      expect(points).toMatchObject(own);
+      expect(own.some((point) => 'dominated' in point)).toBe(false);
+      expect(points.length).toBeGreaterThan(100);
+    });
+
+    it('checks a tube as a design in hand is checked, and lets a run go on', async () => {
+      const desk = await open();
+      const tube = { material: 'steel-4130-n', outerDiameter: 0.08, wall: 0.0031 };
+      const hold = [{ name: 'own', material: tube.material, outerDiameter: '80 mm', wall: '3.1 mm' }];
+      const { followed } = await longRun(desk);
+      const answer = await desk.ask('check', { job: jobOf(), ...tube });
+      const report = (await expectedReport(jobOf({ hold }))) as Report;
+      const { name, ...check } = report.held[0] ?? { name: '' };
+      expect(name).toBe('own');
+      expect(answer).toEqual({ kind: 'checked', check });
+      followed?.stop();
+      expect(await followed?.done).toEqual({ kind: 'stopped' });
+    });
+
+    it('checks nothing of a wrong job, nor of a material that the job has not', async () => {
+      const desk = await open();
+      const tube = { material: 'steel-4130-n', outerDiameter: 0.08, wall: 0.003 };
+      const answer = await desk.ask('check', { job: jobOf({ tube: {} }), ...tube });
+      expect(answer).toMatchObject({ kind: 'refused', problems: [{ path: 'tube.length' }] });
+      const unknown = desk.ask('check', { job: jobOf(), ...tube, material: 'al-2024-t3' });
+      expect(await refusalOf(unknown)).toMatchObject({ code: 'bad-arguments' });
+      const solid = desk.ask('check', { job: jobOf(), ...tube, wall: 0.04 });
+      expect(await refusalOf(solid)).toMatchObject({ code: 'bad-arguments' });
     });
 
     it('supersedes a run by a later one', async () => {

@@ -182,7 +182,7 @@ describe('a call', () => {
 
   it('by another name reaches nothing', async () => {
     const { electron } = await testApp();
-    expect([...electron.handlers.keys()]).toEqual([ASK, 'wringwall:ask:remember']);
+    expect([...electron.handlers.keys()]).toEqual([ASK, 'wringwall:ask:remember', 'wringwall:ask:check']);
     expect([...electron.listeners.keys()]).toEqual([FOLLOW, 'wringwall:stop:size']);
   });
 

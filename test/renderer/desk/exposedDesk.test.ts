@@ -12,6 +12,7 @@ function exposed(reply: Reply<Beginning>): Exposed & { say: (line: Line) => void
     },
     begin: () => Promise.resolve(reply),
     remember: () => Promise.resolve({ answer: null }),
+    check: () => Promise.reject(new Error('not asked')),
     size: (_: { readonly job: unknown }, onLine: (line: Line) => void) => {
       bridge.say = onLine;
       return () => {

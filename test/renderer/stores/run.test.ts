@@ -126,6 +126,21 @@ describe('the run', () => {
     expect(masses).toEqual(masses.toSorted((one, other) => one - other));
   });
 
+  it('shows fronts as they are found, held against those that are there', () => {
+    expect(run.front?.points).toEqual([]);
+    const fronts = sized(last().job).updates.flatMap((update) => (update.kind === 'front' ? [update] : []));
+    let count = 0;
+    for (const front of fronts) {
+      last().update(front);
+      count += front.points.length;
+      expect(run.front?.points).toHaveLength(count);
+    }
+    const end = sized(last().job).end;
+    expect(run.front).toEqual(end.kind === 'report' ? { job: end.report.job, ...end.report.front } : null);
+    last().update({ kind: 'restarted', reason: 'begun anew' });
+    expect(run.front?.points).toEqual([]);
+  });
+
   it('leaves out at once a material that the job in flight does not have', async () => {
     await finish();
     job.edit('materials', ['al-2024-t3']);
