@@ -102,6 +102,9 @@ function listen(server: Server): Promise<number> {
   });
 }
 
+/** What a socket says whose other end has gone, as when the window stops a run: nobody is refused. */
+const GONE: ReadonlySet<string> = new Set(['ECONNRESET', 'EPIPE']);
+
 /** Opens the host on the loopback address, at a port of the system's choice, with a token of its own. */
 export async function openHost({ desk, files, log }: HostOptions): Promise<BrowserHost> {
   const server = createServer({ requestTimeout: 20_000, headersTimeout: 10_000, maxHeaderSize: 16_384 });
@@ -116,7 +119,7 @@ export async function openHost({ desk, files, log }: HostOptions): Promise<Brows
     });
   });
   server.on('clientError', (error: NodeJS.ErrnoException, socket) => {
-    if (error.code !== 'ECONNRESET') log(`refused a request that is not HTTP: ${error.code ?? 'malformed'}`);
+    if (!GONE.has(error.code ?? '')) log(`refused a request that is not HTTP: ${error.code ?? 'malformed'}`);
     if (socket.writable) socket.end('HTTP/1.1 400 Bad Request\r\nConnection: close\r\n\r\n');
     else socket.destroy();
   });

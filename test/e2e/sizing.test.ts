@@ -47,7 +47,7 @@ it('another material is chosen by double click or Enter, and the lightest taken 
     expect(taken.job).not.toHaveProperty('pick');
     expect(await pickedKey(page)).toBe('m al-6061-t6');
 
-    await page.keyboard.press('Alt+3');
+    await page.keyboard.press('Alt+5');
     await page.keyboard.press('ArrowUp');
     await page.keyboard.press('Home');
     await page.keyboard.press('ArrowDown');
