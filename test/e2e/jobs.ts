@@ -52,8 +52,8 @@ export const PLAIN = BASE;
 export const TWELVE_METALS: JobDocument = { ...BASE, materials: RECORDS.slice(0, 12).map(({ id }) => id) };
 export const THIRTY_LOADS: JobDocument = { ...BASE, loads: loads(30) };
 export const FORTY_MATERIALS: JobDocument = { ...BASE, materials: records(40) };
-/** So much that it takes some seconds. */
-export const HEAVY: JobDocument = { ...BASE, loads: loads(60), materials: records(40) };
+/** So much that it takes a second or two. */
+export const HEAVY: JobDocument = { ...BASE, loads: loads(25), materials: records(40) };
 /** So much that it takes many seconds. */
 export const LONG: JobDocument = { ...BASE, loads: loads(150), materials: records(40) };
 /** An envelope too small for the torque: each of its materials fits with a single change. */

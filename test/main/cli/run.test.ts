@@ -7,6 +7,7 @@ import { programVersion } from '../../../main/files/assets.js';
 import { sampleJob, sampleRecord, type Doc } from '../../src/job/sample.js';
 import { sampleReport } from '../../src/report/sampleReport.js';
 import { temporaryFolder } from '../temporary.js';
+import { CAUTION } from '../../../src/report/words.js';
 
 interface Told {
   readonly status: number;
@@ -60,7 +61,7 @@ describe('run sizes a job and', () => {
     const { status, out, err } = await told(folderWith(), ['job.json']);
     expect(status).toBe(0);
     expect(out.split('\n').slice(0, 5).join('\n')).toMatch(/^Sample\n\nmaterial .*\n-+ .*\nown .*0\.00$/);
-    expect(out.endsWith('local codes govern.\n')).toBe(true);
+    expect(out.endsWith(`\n${CAUTION}\n`)).toBe(true);
     expect(err).toBe('');
   });
 
