@@ -25,8 +25,9 @@ export function frontOf(job: Job, metal: Metal, chosen: Design | null): OwnPoint
   const traded = against === 'twist' ? tradedTwist(job, metal) : tradedDiameter(job);
   if (tubes === null) return rungs(job, metal, traded);
   const sizes = passing(new Problem(traded.free, metal), tubes);
+  const own = new Problem(job, metal);
   return unbeaten(
-    sizes.map((size) => pointOf(job, metal, size, traded.free)),
+    sizes.map((size) => pointOf(job, metal, size, traded.free, own)),
     against,
   );
 }
@@ -35,8 +36,9 @@ export function frontOf(job: Job, metal: Metal, chosen: Design | null): OwnPoint
 function costFront(job: Job, metal: Metal, chosen: Design | null): OwnPoint[] {
   const tubes = tubesOf(sizesOf(job, metal));
   const lightest = chosen === null ? [] : [{ ...chosen, pricePerMetre: null }];
-  const sizes: readonly Size[] = tubes === null ? lightest : passing(new Problem(job, metal), tubes);
-  const points = sizes.map((size) => pointOf(job, metal, size, job));
+  const own = new Problem(job, metal);
+  const sizes: readonly Size[] = tubes === null ? lightest : passing(own, tubes);
+  const points = sizes.map((size) => pointOf(job, metal, size, job, own));
   const priced = points.filter(({ cost }) => cost !== null);
   if (priced.length > 0) return unbeaten(priced, 'cost');
   return points.filter(({ mass, outerDiameter }) => mass === chosen?.mass && outerDiameter === chosen.outerDiameter);
@@ -52,6 +54,7 @@ function rungs(job: Job, metal: Metal, traded: Traded): OwnPoint[] {
   const end = least(tightest, { start: free.size }).found;
   if (end === null) return [];
   const last = Math.max(end.value * (1 + HAIR), first * OPEN_END);
+  const own = new Problem(job, metal);
   const points: OwnPoint[] = [];
   let start: { outerDiameter: number; wall: number } = free.size;
   for (const rung of last < first ? ladder(first, last) : [first]) {
@@ -59,15 +62,15 @@ function rungs(job: Job, metal: Metal, traded: Traded): OwnPoint[] {
     const { size } = solve(at, metal, {}, { start });
     if (size === null) continue;
     start = size;
-    points.push(pointOf(job, metal, size, at));
+    points.push(pointOf(job, metal, size, at, own));
   }
   return points;
 }
 
-function pointOf(job: Job, metal: Metal, size: Size, rung: Job): OwnPoint {
+/** @param own the job's own problem, the same for every point of a front */
+function pointOf(job: Job, metal: Metal, size: Size, rung: Job, own: Problem): OwnPoint {
   const { outerDiameter, wall, pricePerMetre } = size;
   const { mass, twist, cost } = designOf(job, metal, outerDiameter, wall, pricePerMetre);
-  const own = new Problem(job, metal);
   const meetsJob = own.passes(outerDiameter, wall);
   const checks = rung === job ? own.checks : new Problem(rung, metal).checks;
   const entries = limitEntries(rung, checks, own.section.set(outerDiameter, wall));

@@ -1,7 +1,7 @@
 import type { Job } from '../job/job.js';
 import type { Metal, Sizes, StockTube } from '../material/material.js';
 import type { Optimality } from '../report/report.js';
-import { least, type Options, type Start } from './least.js';
+import { least, type Options } from './least.js';
 import { Problem, type Variation } from './problem.js';
 import { lightestListed, type Size } from './stock.js';
 
@@ -43,8 +43,8 @@ export function solve(job: Job, metal: Metal, variation: Variation = {}, options
 }
 
 /** Whether any size of the metal passes the job, as varied. */
-export function fits(job: Job, metal: Metal, variation: Variation = {}, start?: Start): boolean {
-  return solve(job, metal, variation, { anyWillDo: true, start }).size !== null;
+export function fits(job: Job, metal: Metal, variation: Variation = {}): boolean {
+  return solve(job, metal, variation, { anyWillDo: true }).size !== null;
 }
 
 function optimality(method: string, mass: number, lowerBound: number, evaluations: number): Optimality {
